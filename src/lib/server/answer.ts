@@ -1,0 +1,44 @@
+import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
+import { Invalid, NoRoom, Refusal, TooMany, Unauthenticated } from './errors';
+
+/** Wraps a `load` or a form action: a refusal becomes Kit's error page, or the way to the sign-in page. */
+export function page<Event extends RequestEvent | { url: URL }, Result>(
+	work: (event: Event) => Promise<Result>
+): (event: Event) => Promise<Result> {
+	return async (event) => {
+		try {
+			return await work(event);
+		} catch (refusal) {
+			if (refusal instanceof Unauthenticated) redirect(303, signInFor(event.url));
+			if (refusal instanceof NoRoom) redirect(303, '/room/new');
+			if (refusal instanceof Refusal) error(refusal.status, refusal.message);
+			throw refusal;
+		}
+	};
+}
+
+/** Wraps an `/api` handler: a refusal becomes `{ message, issues? }` with its status. */
+export function api<Event extends RequestEvent>(
+	work: (event: Event) => Promise<Response>
+): (event: Event) => Promise<Response> {
+	return async (event) => {
+		try {
+			return await work(event);
+		} catch (refusal) {
+			if (refusal instanceof Refusal) return refuse(refusal);
+			throw refusal;
+		}
+	};
+}
+
+export function refuse(refusal: Refusal): Response {
+	const issues = refusal instanceof Invalid ? { issues: refusal.issues } : {};
+	const headers: HeadersInit =
+		refusal instanceof TooMany ? { 'retry-after': String(refusal.retryAfter) } : {};
+	return json({ message: refusal.message, ...issues }, { status: refusal.status, headers });
+}
+
+/** The sign-in page, told where to return to. */
+export function signInFor(url: URL): string {
+	return `/sign-in?next=${encodeURIComponent(url.pathname + url.search)}`;
+}
