@@ -17,7 +17,7 @@ export function page<Event extends RequestEvent | { url: URL }, Result>(
 	};
 }
 
-/** Wraps an `/api` handler: a refusal becomes `{ message, issues? }` with its status. */
+/** Wraps an `/api` handler: a refusal becomes `{ message, issues?, current? }` with its status. */
 export function api<Event extends RequestEvent>(
 	work: (event: Event) => Promise<Response>
 ): (event: Event) => Promise<Response> {
@@ -33,9 +33,10 @@ export function api<Event extends RequestEvent>(
 
 export function refuse(refusal: Refusal): Response {
 	const issues = refusal instanceof Invalid ? { issues: refusal.issues } : {};
+	const current = refusal instanceof Conflict ? { current: refusal.current } : {};
 	const headers: HeadersInit =
 		refusal instanceof TooMany ? { 'retry-after': String(refusal.retryAfter) } : {};
-	return json({ message: refusal.message, ...issues }, { status: refusal.status, headers });
+	return json({ message: refusal.message, ...issues, ...current }, { status: refusal.status, headers });
 }
 
 /** The sign-in page, told where to return to. */

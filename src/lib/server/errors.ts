@@ -39,8 +39,15 @@ export class NoRoom extends Refusal {
 	}
 }
 
+/** Somebody else got there first. Where an edit lost, `current` is what stands now, to be shown beside it. */
 export class Conflict extends Refusal {
 	readonly status = 409;
+	constructor(
+		message: string,
+		readonly current?: unknown
+	) {
+		super(message);
+	}
 }
 
 export class Invalid extends Refusal {
