@@ -1,3 +1,4 @@
+import type { Caliper } from './caliper';
 import type { Length, LengthUnit } from './length';
 import type { Money } from './money';
 
@@ -101,6 +102,8 @@ interface Owned {
 	readonly price: Money | null;
 	/** On order: serves from this date (YYYY-MM-DD) on. */
 	readonly arrives: string | null;
+	/** Units in which measures were entered, by field, where `unit` doesn't say it. */
+	readonly entered?: Readonly<Record<string, string>>;
 }
 
 export interface SheetSupply extends Owned {
@@ -114,13 +117,13 @@ export interface SheetSupply extends Owned {
 	readonly count: Counted;
 	readonly faces: readonly Face[];
 	readonly weight: PaperWeight | null;
-	readonly caliper: Length | null;
+	readonly caliper: Caliper | null;
 	readonly colours: readonly string[];
 	readonly offcut: boolean;
 	readonly strip: { readonly edge: Edge; readonly depth: Length } | null;
 }
 
-/** `left` and `full` are lengths, volumes (1/16 nl) or counts, as `SUPPLY_MEASURES` says for the kind. */
+/** `left` and `full` are lengths, volumes (1/16 pl) or counts, as `SUPPLY_MEASURES` says for the kind. */
 export interface ConsumableSupply extends Owned {
 	readonly group: 'consumable';
 	readonly kind: ConsumableKind;

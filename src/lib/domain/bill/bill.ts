@@ -1,3 +1,4 @@
+import type { Caliper } from '../caliper';
 import type { Length } from '../length';
 import type { ConsumableKind, Edge, PaperWeight, SheetGoods, ToolKind } from '../stash';
 
@@ -5,7 +6,7 @@ import type { ConsumableKind, Edge, PaperWeight, SheetGoods, ToolKind } from '..
 export interface Material {
 	readonly kind: SheetGoods;
 	readonly weight: { readonly min: PaperWeight | null; readonly max: PaperWeight | null } | null;
-	readonly caliper: { readonly min: Length | null; readonly max: Length | null } | null;
+	readonly caliper: { readonly min: Caliper | null; readonly max: Caliper | null } | null;
 }
 
 export interface Slot {
@@ -103,6 +104,8 @@ export interface Bill {
 	readonly key: string;
 	readonly name: string;
 	readonly measures: Readonly<Record<string, Length>>;
+	/** Measures that no formula of the bill uses. */
+	readonly unusedMeasures?: readonly string[];
 	readonly slots: readonly Slot[];
 	readonly pieces: readonly Piece[];
 	readonly adhesives: readonly ConsumableNeed[];

@@ -1,4 +1,4 @@
-import { greatestCommonDivisor, writeMixed } from './rational';
+import { greatestCommonDivisor, writeDecimal, writeMixed } from './rational';
 import { DISPLAY_STEP, UNIT_LENGTH, type Length, type LengthUnit } from './units';
 
 /** A length ready for setting: `numerator/denominator` for inches and yards, `decimal` for metric units. */
@@ -39,7 +39,7 @@ export function lengthParts(value: Length, unit: LengthUnit): LengthParts {
 		whole,
 		numerator: metric ? 0 : rest / shared,
 		denominator: metric ? 1 : perUnit / shared,
-		decimal: metric ? decimal(steps, perUnit) : null,
+		decimal: metric ? writeDecimal(steps, perUnit) : null,
 		unit
 	};
 }
@@ -61,7 +61,7 @@ export function spokenLength(value: Length, unit: LengthUnit): string {
 export function writeExact(value: Length, unit: LengthUnit): string {
 	const perUnit = UNIT_LENGTH[unit];
 	const metric = unit !== 'in' && unit !== 'yd';
-	return `${metric ? decimal(value, perUnit) : writeMixed(value, perUnit)} ${unit}`;
+	return `${metric ? writeDecimal(value, perUnit) : writeMixed(value, perUnit)} ${unit}`;
 }
 
 /** As `writeExact`, in the user's ruler marks: only for a value that is a whole number of them. */
@@ -74,15 +74,6 @@ function figures({ whole, numerator, denominator, decimal: digits }: LengthParts
 	if (numerator === 0) return String(whole);
 	const fraction = `${numerator}⁄${denominator}`;
 	return whole === 0 ? fraction : `${whole} ${fraction}`;
-}
-
-/** Every metric unit divides a power of ten, so the digits end within nine places. */
-function decimal(n: number, perUnit: number): string {
-	const whole = Math.floor(n / perUnit);
-	const rest = n % perUnit;
-	if (rest === 0) return String(whole);
-	const places = String((BigInt(rest) * 10n ** 9n) / BigInt(perUnit)).padStart(9, '0');
-	return `${whole}.${places.replace(/0+$/, '')}`;
 }
 
 function spokenFraction({ numerator, denominator }: LengthParts): string {
