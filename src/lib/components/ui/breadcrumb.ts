@@ -1,0 +1,4 @@
+export interface Crumb {
+	readonly label: string;
+	readonly href: string;
+}
