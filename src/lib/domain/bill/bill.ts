@@ -73,7 +73,11 @@ export interface ConsumableNeed {
 	readonly kind: ConsumableKind;
 	readonly width: Length | null;
 	readonly need: number;
-	readonly swaps: readonly { readonly kind: ConsumableKind; readonly width: Length | null; readonly times: number }[];
+	readonly swaps: readonly {
+		readonly kind: ConsumableKind;
+		readonly width: Length | null;
+		readonly times: number;
+	}[];
 }
 
 export interface ToolNeed {
