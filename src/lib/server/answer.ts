@@ -1,5 +1,5 @@
 import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
-import { Invalid, NoRoom, Refusal, TooMany, Unauthenticated } from './errors';
+import { Conflict, Invalid, NoRoom, Refusal, TooMany, Unauthenticated } from './errors';
 
 /** Wraps a `load` or a form action: a refusal becomes Kit's error page, or the way to the sign-in page. */
 export function page<Event extends RequestEvent | { url: URL }, Result>(
@@ -32,7 +32,10 @@ export function api<Event extends RequestEvent>(
 }
 
 export function refuse(refusal: Refusal): Response {
-	const issues = refusal instanceof Invalid ? { issues: refusal.issues } : {};
+	const issues =
+		refusal instanceof Invalid
+			? { issues: refusal.issues.map(({ path, message }) => ({ path: path.join('.'), message })) }
+			: {};
 	const current = refusal instanceof Conflict ? { current: refusal.current } : {};
 	const headers: HeadersInit =
 		refusal instanceof TooMany ? { 'retry-after': String(refusal.retryAfter) } : {};

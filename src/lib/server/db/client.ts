@@ -1,6 +1,6 @@
 import { createClient, type Client, type ResultSet } from '@libsql/client';
 import { sql } from 'drizzle-orm';
-import { drizzle } from 'drizzle-orm/libsql';
+import { drizzle, type LibSQLDatabase } from 'drizzle-orm/libsql';
 import { migrate } from 'drizzle-orm/libsql/migrator';
 import type { BaseSQLiteDatabase } from 'drizzle-orm/sqlite-core';
 import { setTimeout as pause } from 'node:timers/promises';
@@ -8,7 +8,7 @@ import { databaseCode } from '../errors';
 
 /** Anything that can be read from: the reader, or a transaction that is under way. */
 export type Reader = BaseSQLiteDatabase<'async', ResultSet>;
-export type Transaction = Parameters<Parameters<ReturnType<typeof drizzle>['transaction']>[0]>[0];
+export type Transaction = Parameters<Parameters<LibSQLDatabase['transaction']>[0]>[0];
 type Write = <T>(work: (tx: Transaction) => Promise<T>) => Promise<T>;
 
 export interface Database {
@@ -37,7 +37,7 @@ const PATIENCE_MS = 10_000;
 export async function openDatabase(url: string, authToken?: string): Promise<Database> {
 	const writer = createClient({ url, authToken, concurrency: 1, timeout: 300 });
 	const readers = createClient({ url, authToken, timeout: 300 });
-	const writing = drizzle(writer);
+	const writing: LibSQLDatabase = drizzle(writer);
 	if (url.startsWith('file:')) await whileBusy(writer, () => writer.execute('PRAGMA journal_mode = WAL'));
 	await assertForeignKeys(writer);
 
@@ -49,7 +49,7 @@ export async function openDatabase(url: string, authToken?: string): Promise<Dat
 	};
 
 	return {
-		reader: drizzle(readers),
+		reader: drizzle(readers) as LibSQLDatabase,
 		write,
 		migrate: (migrationsFolder) => migrateOnce(writer, migrationsFolder),
 		close: () => {
@@ -80,7 +80,7 @@ async function whileBusy<T>(client: Client, work: () => Promise<T>): Promise<T> 
 async function migrateOnce(writer: Client, migrationsFolder: string): Promise<void> {
 	for (let tries = 5; ; tries--) {
 		try {
-			return await whileBusy(writer, () => migrate(drizzle(writer), { migrationsFolder }));
+			return await whileBusy(writer, () => migrate(drizzle(writer) as LibSQLDatabase, { migrationsFolder }));
 		} catch (error) {
 			if (tries === 0) throw error;
 			await pause(200);

@@ -1,0 +1,19 @@
+import type { Handle } from '@sveltejs/kit';
+import { sessionSecret } from '../../../auth';
+import { reader, write } from '../db/client';
+import { env } from '../env';
+import { findSession } from '../queries/people';
+import { isSeenStale, noteSeen } from '../services/sessions';
+
+/** Looks the session up at every request, so that one which has been ended is over at once. */
+export const identify: Handle = async ({ event, resolve }) => {
+	const secret = await sessionSecret(event);
+	const signedIn = secret ? await findSession(reader, secret) : undefined;
+	if (signedIn) {
+		const { user, session, seenAt } = signedIn;
+		event.locals.user = user.email === env.ADMIN_EMAIL ? { ...user, siteRole: 'admin' } : user;
+		event.locals.session = session;
+		if (isSeenStale(seenAt)) await write((tx) => noteSeen(tx, session.id));
+	}
+	return resolve(event);
+};
