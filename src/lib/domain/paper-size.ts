@@ -114,6 +114,9 @@ export const PAPER_SIZES: readonly PaperSize[] = [
 	...millimetres('envelope', [['DL envelope', 110, 220]])
 ];
 
+/** A name that two sizes could claim stays with the paper: `A7` is ISO's, `#10` and `DL` only an envelope's. */
 const BY_NAME: ReadonlyMap<string, PaperSize> = new Map([
+	...PAPER_SIZES.map((size) => [nameKey(size.name.replace(/ envelope$/, '')), size] as const).reverse(),
+	...PAPER_SIZES.map((size) => [nameKey(size.name.replace(/^JIS (.*)$/, '$1 JIS')), size] as const),
 	...PAPER_SIZES.map((size) => [nameKey(size.name), size] as const)
 ]);

@@ -5,6 +5,7 @@ import {
 	DISPLAY_STEP,
 	LONGEST_ROLL,
 	LONGEST_SHEET,
+	METRE,
 	UNIT_LENGTH,
 	type Length,
 	type LengthUnit
@@ -63,7 +64,7 @@ function readOne(typed: string, bare: LengthUnit, entry: LengthEntry): LengthRea
 		return refuse(`“${typed}” doesn’t end in a unit used here. Type ${allowed(entry)} after the number.`);
 	if (!entry.long && (unit === 'm' || unit === 'yd'))
 		return refuse('Metres and yards are for tape. Type in, mm or cm here.');
-	if (THOUSANDS.test(number)) {
+	if (readsTwoWays(number, unit, entry)) {
 		return refuse(
 			`“${number}” can be read two ways. Type ${number.replace(',', '')} or ${number.replace(',', '.')}.`
 		);
@@ -83,6 +84,12 @@ function measure(amount: Rational, unit: LengthUnit, typed: string, entry: Lengt
 	}
 	if (scaled % amount.d !== 0n) return refuse(between(typed, { n: scaled, d: amount.d }, unit));
 	return { ok: true, value: Number(scaled / amount.d), unit };
+}
+
+/** `1,500 mm` is fifteen hundred to one maker and one and a half to another; `6,375 in` can only be the smaller. */
+function readsTwoWays(number: string, unit: LengthUnit, entry: LengthEntry): boolean {
+	if (!/^[1-9]\d{0,2},\d{3}$/.test(number)) return false;
+	return Number(number.replace(',', '')) * UNIT_LENGTH[unit] <= (entry.long ? LONGEST_ROLL : LONGEST_LIKELY);
 }
 
 /** Names the two lengths that can be kept on either side of what was typed, and the ruler's marks around it. */
@@ -117,8 +124,8 @@ function refuse(reason: string): Refused {
 const EXAMPLE = '6 3/8 in or 162 mm';
 const LONGEST_TYPING = 60;
 const FEET = /^(?:'|ft|foot|feet)/;
-/** `1,500` is fifteen hundred to one maker and one and a half to another. */
-const THOUSANDS = /^[1-9]\d{0,2},\d{3}$/;
+/** No sheet on a craft table is longer. */
+const LONGEST_LIKELY = 10 * METRE;
 
 const UNIT_WORDS = new Map<string, LengthUnit>(
 	(
