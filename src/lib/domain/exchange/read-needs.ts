@@ -14,7 +14,7 @@ export function consumableNeedFrom(line: ConsumableNeedDocument, reading: Readin
 			if (SUPPLY_MEASURES[swap.kind] !== SUPPLY_MEASURES[line.kind])
 				reading.fail(
 					`swaps.${index}.kind`,
-					`${named(swap.kind)} is told by ${SUPPLY_MEASURES[swap.kind]}, ${named(line.kind)} by ${SUPPLY_MEASURES[line.kind]}: one can’t be reckoned as the other.`
+					`A swap for ${named(line.kind)} has to come by ${SUPPLY_MEASURES[line.kind]} too; this comes by ${SUPPLY_MEASURES[swap.kind]}.`
 				);
 			return {
 				kind: swap.kind,
