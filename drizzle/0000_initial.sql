@@ -110,7 +110,6 @@ CREATE TABLE `projects` (
 	`key` text NOT NULL,
 	`name` text NOT NULL,
 	`bill` text NOT NULL,
-	`units` text NOT NULL,
 	`copies` integer DEFAULT 1 NOT NULL,
 	`position` integer NOT NULL,
 	`version` integer DEFAULT 1 NOT NULL,
@@ -119,8 +118,7 @@ CREATE TABLE `projects` (
 	`deletedAt` integer,
 	FOREIGN KEY (`roomId`) REFERENCES `rooms`(`id`) ON UPDATE no action ON DELETE cascade,
 	CONSTRAINT "projects_name" CHECK(length(trim("projects"."name")) > 0),
-	CONSTRAINT "projects_copies" CHECK("projects"."copies" between 1 and 999),
-	CONSTRAINT "projects_units" CHECK("projects"."units" in ('in', 'mm', 'cm'))
+	CONSTRAINT "projects_copies" CHECK("projects"."copies" between 1 and 1000)
 );
 --> statement-breakpoint
 CREATE UNIQUE INDEX `projects_room_key` ON `projects` (`roomId`,`key`);--> statement-breakpoint
@@ -191,6 +189,7 @@ CREATE TABLE `supplies` (
 	`w` integer,
 	`h` integer,
 	`unit` text,
+	`entered` text,
 	`amount` integer DEFAULT 0 NOT NULL,
 	`count` text DEFAULT 'counted' NOT NULL,
 	`faces` text DEFAULT '[]' NOT NULL,

@@ -38,6 +38,7 @@ export function columnsOf(supply: Supply): SupplyColumns {
 	return {
 		...NOTHING,
 		...{ group, kind, name, collection, barcode, arrives },
+		entered: supply.entered ?? null,
 		priceAmount: price?.amount ?? null,
 		priceCurrency: price?.currency ?? null,
 		...(supply.group === 'sheet' ? sheetColumns(supply) : {}),
@@ -50,6 +51,7 @@ const NOTHING = {
 	w: null,
 	h: null,
 	unit: null,
+	entered: null,
 	count: 'counted' as const,
 	faces: [],
 	weightText: null,
@@ -132,8 +134,18 @@ function toolOf(row: StashRow): ToolSupply {
 	};
 }
 
-function owned({ key, name, collection, bin, barcode, priceAmount, priceCurrency, arrives }: StashRow) {
+function owned({
+	key,
+	name,
+	collection,
+	bin,
+	barcode,
+	priceAmount,
+	priceCurrency,
+	arrives,
+	entered
+}: StashRow) {
 	const price =
 		priceAmount === null || priceCurrency === null ? null : { amount: priceAmount, currency: priceCurrency };
-	return { key, name, collection, bin, barcode, price, arrives };
+	return { key, name, collection, bin, barcode, price, arrives, ...(entered && { entered }) };
 }

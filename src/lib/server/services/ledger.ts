@@ -3,10 +3,10 @@ import { v7 } from 'uuid';
 import type { Transaction } from '../db/client';
 import { acts, movements } from '../db/schema/ledger';
 import type { ACT_KINDS, Change, MOVEMENT_KINDS } from '../db/schema/ledger';
-import { rooms } from '../db/schema/rooms';
 import { supplies } from '../db/schema/supplies';
 import { Conflict, Forbidden, NotFound } from '../errors';
 import type { Actor } from '../session';
+import { touchRoom } from './revision';
 
 export interface Act {
 	/** Client-made: a second try of the same id changes nothing. */
@@ -51,7 +51,7 @@ export async function perform(
 		.values({ ...act, roomId: actor.roomId, who: actor.userId, at, changes: [...changes] });
 	await apply(tx, actor, changes);
 	await book(tx, actor, act.id, at, entries);
-	await touchRoom(tx, actor);
+	await touchRoom(tx, actor.roomId);
 	return true;
 }
 
@@ -90,14 +90,6 @@ export function undo(tx: Transaction, actor: Actor, input: { id: string; act: st
 
 export function requireWriter(actor: Actor): void {
 	if (actor.role === 'viewer') throw new Forbidden();
-}
-
-/** Marks the room as changed: what was worked out from an earlier revision no longer holds. */
-export async function touchRoom(tx: Transaction, actor: Actor): Promise<void> {
-	await tx
-		.update(rooms)
-		.set({ revision: sql`${rooms.revision} + 1` })
-		.where(eq(rooms.id, actor.roomId));
 }
 
 async function apply(tx: Transaction, actor: Actor, changes: readonly Change[]): Promise<void> {

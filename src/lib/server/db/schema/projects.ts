@@ -2,7 +2,7 @@ import { sql } from 'drizzle-orm';
 import { check, index, integer, sqliteTable, text, uniqueIndex } from 'drizzle-orm/sqlite-core';
 import { rooms } from './rooms';
 
-/** A project in the room's queue. Its bill is kept as the exchange document's JSON, lengths as they were typed. */
+/** A project in the room's queue. Its bill is kept as the exchange document's JSON, lengths as they were typed and with its unit. */
 export const projects = sqliteTable(
 	'projects',
 	{
@@ -13,8 +13,6 @@ export const projects = sqliteTable(
 		key: text().notNull(),
 		name: text().notNull(),
 		bill: text().notNull(),
-		/** What a bare number in the bill means. */
-		units: text({ enum: ['in', 'mm', 'cm'] }).notNull(),
 		copies: integer().notNull().default(1),
 		/** Place in the queue, first at 0. */
 		position: integer().notNull(),
@@ -28,7 +26,6 @@ export const projects = sqliteTable(
 		uniqueIndex('projects_room_key').on(t.roomId, t.key),
 		index('projects_room_position').on(t.roomId, t.deletedAt, t.position),
 		check('projects_name', sql`length(trim(${t.name})) > 0`),
-		check('projects_copies', sql`${t.copies} between 1 and 999`),
-		check('projects_units', sql`${t.units} in ('in', 'mm', 'cm')`)
+		check('projects_copies', sql`${t.copies} between 1 and 1000`)
 	]
 );

@@ -46,8 +46,9 @@ export const supplies = sqliteTable(
 		collection: text(),
 		w: integer(),
 		h: integer(),
-		/** The unit that its size or amount was entered in. */
+		/** The unit that its size or amount was entered in; `entered` has those of its other measures. */
 		unit: text(),
+		entered: text({ mode: 'json' }).$type<Record<string, string>>(),
 		amount: integer().notNull().default(0),
 		count: text({ enum: ['counted', 'unsure'] })
 			.notNull()
@@ -55,6 +56,7 @@ export const supplies = sqliteTable(
 		faces: text({ mode: 'json' }).$type<Face[]>().notNull().default([]),
 		weightText: text(),
 		gsm: real(),
+		/** In 1/200,000 mm. */
 		caliper: integer(),
 		colours: text({ mode: 'json' }).$type<string[]>().notNull().default([]),
 		offcut: integer({ mode: 'boolean' }).notNull().default(false),
