@@ -34,12 +34,12 @@ export function writeMixed(n: number, d: number): string {
 	return whole === 0 ? fraction : `${whole} ${fraction}`;
 }
 
-/** Writes n/d in full, as `16.2`; d has no factor but 2 and 5, so that the digits end (within twelve places here). */
+/** Writes n/d in full, as `16.2`; d has no factor but 2 and 5, so that the digits end (within twenty places here). */
 export function writeDecimal(n: number, d: number): string {
 	const whole = Math.floor(n / d);
 	const rest = n % d;
 	if (rest === 0) return String(whole);
-	const places = String((BigInt(rest) * 10n ** 12n) / BigInt(d)).padStart(12, '0');
+	const places = String((BigInt(rest) * 10n ** 20n) / BigInt(d)).padStart(20, '0');
 	return `${whole}.${places.replace(/0+$/, '')}`;
 }
 
