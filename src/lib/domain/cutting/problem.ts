@@ -38,7 +38,10 @@ export interface CutBudget {
 	readonly work: number;
 	readonly shouldStop?: () => boolean;
 	readonly seed?: number;
-	readonly onProgress?: (progress: { best: readonly [number, number] | null; bound: readonly [number, number] }) => void;
+	readonly onProgress?: (progress: {
+		best: readonly [number, number] | null;
+		bound: readonly [number, number];
+	}) => void;
 }
 
 /** Where one piece lies: `w` and `h` as it lies (swapped where `turned`). */
@@ -88,6 +91,11 @@ export interface CutPlan {
  * `bound` is a proved lower bound on the first cost (and on the second among plans of least first cost).
  */
 export type CutAnswer =
-	| { readonly status: 'planned'; readonly plan: CutPlan; readonly minimum: boolean; readonly bound: readonly [number, number] }
+	| {
+			readonly status: 'planned';
+			readonly plan: CutPlan;
+			readonly minimum: boolean;
+			readonly bound: readonly [number, number];
+	  }
 	| { readonly status: 'impossible'; readonly bound: readonly [number, number] }
 	| { readonly status: 'unknown'; readonly bound: readonly [number, number] };

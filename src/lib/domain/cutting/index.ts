@@ -1,0 +1,3 @@
+export { checkPlan } from './checker';
+export { countCuts, fenceSettings, largestLeftover } from './order';
+export { planCuts } from './plan';

@@ -1,0 +1,32 @@
+/** Counts the search's work. One unit is roughly one box or one pair of boxes looked at, some tens of nanoseconds. */
+import type { CutBudget } from './problem';
+
+const POLL = 2_000;
+
+export class Meter {
+	spent = 0;
+	private stopped = false;
+	private nextPoll = POLL;
+
+	constructor(private readonly budget: CutBudget) {}
+
+	/** Adds `units`; false once the work is used up or the host says stop. */
+	spend(units: number): boolean {
+		this.spent += units;
+		if (this.spent >= this.nextPoll) {
+			this.nextPoll = this.spent + POLL;
+			if (this.budget.shouldStop?.()) this.stopped = true;
+		}
+		return this.open;
+	}
+
+	get open(): boolean {
+		return !this.stopped && this.spent < this.budget.work;
+	}
+
+	/** A smaller allowance within this one: true until `units` more are spent, or this one ends. */
+	allow(units: number): () => boolean {
+		const end = this.spent + units;
+		return () => this.open && this.spent < end;
+	}
+}
