@@ -69,7 +69,7 @@ export const giftBoxes: BillDocument = {
 			kind: 'tape',
 			width: '1/4 in',
 			need: '66 in',
-			swaps: [{ kind: 'glue-dots', times: 1 }]
+			swaps: [{ kind: 'tape', width: '1/8 in', times: 2 }]
 		}
 	],
 	tools: [

@@ -72,8 +72,7 @@ export const shakerCards: BillDocument = {
 			name: 'Well wall',
 			kind: 'foam-tape',
 			width: '1/4 in',
-			need: '66 in',
-			swaps: [{ kind: 'foam-squares', times: 1 }]
+			need: '66 in'
 		},
 		{ key: 'window', name: 'Window rim', kind: 'tape', width: '1/8 in', need: '33 in' }
 	],

@@ -1,3 +1,4 @@
+import { checkDigit } from '../../src/lib/domain/check-digit';
 import type { SupplyDocument } from '../../src/lib/domain/exchange/supply-schema';
 import type { Print } from '../patterns/paint';
 
@@ -12,9 +13,8 @@ export type Faces = NonNullable<SheetDocument['faces']>;
 
 /** The nth made-up product's barcode: GS1 keeps the prefix 952 for examples. */
 export function barcode(nth: number): string {
-	const digits = `952000${String(nth).padStart(6, '0')}`;
-	const sum = [...digits].reduce((total, digit, i) => total + Number(digit) * (i % 2 === 0 ? 1 : 3), 0);
-	return `${digits}${(10 - (sum % 10)) % 10}`;
+	const payload = `952000${String(nth).padStart(6, '0')}`;
+	return `${payload}${checkDigit(payload)}`;
 }
 
 export const dollars = (cents: number) => ({ amount: cents, currency: 'USD' });
