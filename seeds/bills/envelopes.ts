@@ -49,7 +49,13 @@ export const envelopes: BillDocument = {
 	],
 	adhesives: [
 		{ key: 'liners', name: 'Behind the liners', kind: 'tape', width: '1/8 in', need: '92 1/2 in' },
-		{ key: 'sides', name: 'Side flaps', kind: 'glue-stick', need: 1, swaps: [{ kind: 'glue-dots', times: 20 }] }
+		{
+			key: 'sides',
+			name: 'Side flaps',
+			kind: 'glue-stick',
+			need: 1,
+			swaps: [{ kind: 'glue-dots', times: 20 }]
+		}
 	],
 	tools: [
 		{ key: 'trim', name: 'Trimmer', kind: 'trimmer', reach: '11 in' },
