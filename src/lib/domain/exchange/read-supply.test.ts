@@ -66,7 +66,7 @@ const roll = fc.record(
 	optional(['key', 'name', 'kind', 'left'])
 );
 const volume = fc
-	.tuple(fc.integer({ min: 1, max: 999 }), fc.constantFrom('ml', 'fl oz', 'l'))
+	.tuple(fc.integer({ min: 1, max: 500 }), fc.constantFrom('ml', 'fl oz', 'l'))
 	.map(([n, u]) => `${n} ${u}`);
 const liquid = fc.record(
 	{ ...owned, kind: fc.constantFrom('glue', 'ink'), left: volume, full: volume, count },
