@@ -55,7 +55,7 @@ export async function findAccount(db: Reader, email: string) {
 
 export async function hasPassword(db: Reader, userId: string): Promise<boolean> {
 	const [row] = await db.select({ passwordHash: users.passwordHash }).from(users).where(eq(users.id, userId));
-	return row?.passwordHash != null;
+	return typeof row?.passwordHash === 'string';
 }
 
 function alive() {

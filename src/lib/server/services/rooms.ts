@@ -1,10 +1,11 @@
-import { and, count, eq, gt, isNull } from 'drizzle-orm';
+import { and, count, eq, isNull } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import type { RoomRole, RoomSettings } from '../../schemas/rooms';
 import type { Transaction } from '../db/client';
 import { invitations, memberships, rooms } from '../db/schema/rooms';
 import { Conflict, NotFound } from '../errors';
 import { LIFETIME_MS } from '../lifetimes';
+import { INVITATION_OVER, stillOpen } from '../queries/rooms';
 import { hashSecret, newSecret } from '../secrets';
 import type { Actor } from '../session';
 import { touchRoom } from './revision';
@@ -65,16 +66,9 @@ export async function joinRoom(tx: Transaction, userId: string, secret: string):
 	const [invitation] = await tx
 		.update(invitations)
 		.set({ usedAt: Date.now() })
-		.where(
-			and(
-				eq(invitations.hash, hashSecret(secret)),
-				isNull(invitations.usedAt),
-				isNull(invitations.revokedAt),
-				gt(invitations.expiresAt, Date.now())
-			)
-		)
+		.where(and(eq(invitations.hash, hashSecret(secret)), stillOpen()))
 		.returning({ roomId: invitations.roomId, role: invitations.role });
-	if (!invitation) throw new NotFound('This invitation has been used, taken back, or has run out.');
+	if (!invitation) throw new NotFound(INVITATION_OVER);
 	await tx
 		.insert(memberships)
 		.values({ ...invitation, userId, joinedAt: Date.now() })
