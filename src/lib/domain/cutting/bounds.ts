@@ -15,6 +15,20 @@ export interface Inequality {
 }
 
 type Dual = (x: number) => number;
+const same: Dual = (x) => x;
+
+/** Real areas only: the quickest bound. */
+export function areasOf(model: Model): Inequality[] {
+	return [
+		inequalityOf(
+			model,
+			model.sheets.map(() => true),
+			same,
+			same,
+			model.sheets.map(({ area }) => area)
+		)
+	];
+}
 
 export function inequalitiesOf(model: Model, thorough: boolean): Inequality[] {
 	const w = Math.max(0, ...model.sheets.map((sheet) => sheet.w));
@@ -75,7 +89,7 @@ function inequalityOf(
 }
 
 function dualsOf(size: number, sides: readonly number[], thorough: boolean): Dual[] {
-	const duals: Dual[] = [(x) => x];
+	const duals: Dual[] = [same];
 	const most = thorough ? 40 : 8;
 	const halves = [...new Set(sides.flatMap((side) => [side, size - side]))].filter(
 		(e) => e > 0 && 2 * e <= size

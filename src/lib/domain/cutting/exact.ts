@@ -4,17 +4,23 @@
  * pattern cut down to what is still wanted; the last one is looked up. What is left over for the remaining
  * sheets and could not be held is remembered for all later combinations.
  */
-import type { Box } from './box';
+import { without, type Box } from './box';
 import type { Combination } from './combinations';
-import { boxOf, fitsIn, frontierOf, statesOf, type Frontier, type States } from './frontier';
+import { boxOf, countsOf, fitsIn, frontierOf, statesOf, type Frontier, type States } from './frontier';
 import type { Opened } from './layout';
 import type { Meter } from './meter';
 import type { Model } from './model';
 
 const MOST_STATES = 400_000;
 
+/** A listed pattern and the part of it that its sheet is to hold. */
+interface Chosen {
+	readonly pattern: number;
+	readonly taken: number;
+}
+
 export class Patterns {
-	readonly full: number;
+	private readonly full: number;
 	private readonly maximal = new Map<number, readonly number[]>();
 	private readonly failed = new Map<string, Set<number>>();
 
@@ -29,10 +35,14 @@ export class Patterns {
 		this.full = states.size - 1;
 	}
 
-	/** Null where there are too many patterns for the allowance. */
-	static of(model: Model, meter: Meter, go: () => boolean): Patterns | null {
+	/** Whether the patterns can be numbered at all within reason. */
+	static few(model: Model): boolean {
+		return statesOf(model).size <= MOST_STATES;
+	}
+
+	/** Lists the patterns that lose no more than `loss` within their boxes, pausing between states. */
+	static *of(model: Model, loss: number, meter: Meter): Generator<undefined, Patterns> {
 		const states = statesOf(model);
-		if (states.size > MOST_STATES) return null;
 		const classes = new Map<string, number[]>();
 		model.sheets.forEach(({ may, count }, s) => {
 			const key = may.join('');
@@ -40,8 +50,7 @@ export class Patterns {
 		});
 		const frontiers: Frontier[] = new Array<Frontier>(model.sheets.length);
 		for (const sheets of classes.values()) {
-			const frontier = frontierOf(model, states, sheets, meter, go);
-			if (!frontier) return null;
+			const frontier = yield* frontierOf(model, states, sheets, loss, meter);
 			for (const s of sheets) frontiers[s] = frontier;
 		}
 		const kinds = model.pieces.length;
@@ -65,30 +74,40 @@ export class Patterns {
 		return frontier !== undefined && fitsIn(frontier, state, w, h);
 	}
 
-	box(sheet: number, state: number): Box {
-		const { w, h } = this.model.sheets[sheet] as { w: number; h: number };
-		return boxOf(this.model, this.states, this.frontiers[sheet] as Frontier, state, w, h);
-	}
-
-	/** The opened sheets that hold `wanted`, null where `combination` can't, undefined where `go` ends first. */
-	cover(combination: Combination, wanted: number, go: () => boolean): Opened[] | null | undefined {
+	/** The opened sheets that hold everything, null where `combination` can't, undefined where `go` ends first. */
+	cover(combination: Combination, go: () => boolean): Opened[] | null | undefined {
 		const sequence = combination.counts
 			.flatMap((count, sheet) => Array.from({ length: count }, () => sheet))
 			.sort((a, b) => (this.model.sheets[a]?.area ?? 0) - (this.model.sheets[b]?.area ?? 0) || a - b);
-		const chosen: number[] = [];
-		const answer = this.descend(sequence, 0, wanted, chosen, go);
+		const chosen: Chosen[] = [];
+		const answer = this.descend(sequence, 0, this.full, chosen, go);
 		if (!answer) return answer === false ? null : undefined;
-		return chosen.flatMap((state, i) => {
+		return chosen.flatMap((choice, i) => {
 			const sheet = sequence[i] as number;
-			return state === 0 ? [] : [{ sheet, box: this.box(sheet, state) }];
+			return choice.taken === 0 ? [] : [{ sheet, box: this.box(sheet, choice) }];
 		});
+	}
+
+	/** The pattern's layout, less what another sheet already holds. */
+	private box(sheet: number, { pattern, taken }: Chosen): Box {
+		const { w, h } = this.model.sheets[sheet] as { w: number; h: number };
+		const frontier = this.frontiers[sheet] as Frontier;
+		if (fitsIn(frontier, taken, w, h)) return boxOf(this.model, this.states, frontier, taken, w, h);
+		const left = countsOf(this.states, taken);
+		const box = boxOf(this.model, this.states, frontier, pattern, w, h);
+		const kept = without(box, ({ piece }) => {
+			left[piece] = (left[piece] as number) - 1;
+			return (left[piece] as number) < 0;
+		});
+		if (!kept) throw new Error('a sheet was opened for nothing');
+		return kept;
 	}
 
 	private descend(
 		sequence: readonly number[],
 		at: number,
 		wanted: number,
-		chosen: number[],
+		chosen: Chosen[],
 		go: () => boolean
 	): boolean | undefined {
 		if (wanted === 0) {
@@ -98,7 +117,7 @@ export class Patterns {
 		if (at >= sequence.length) return false;
 		const sheet = sequence[at] as number;
 		if (this.fits(sheet, wanted)) {
-			chosen[at] = wanted;
+			chosen[at] = { pattern: wanted, taken: wanted };
 			chosen.length = at + 1;
 			return true;
 		}
@@ -116,7 +135,7 @@ export class Patterns {
 			if (!this.meter.spend(4) || !go()) return undefined;
 			const taken = this.common(pattern, wanted);
 			if ((this.areas[taken] as number) < least) continue;
-			chosen[at] = taken;
+			chosen[at] = { pattern, taken };
 			const answer = this.descend(sequence, at + 1, wanted - taken, chosen, go);
 			if (answer !== false) return answer;
 		}

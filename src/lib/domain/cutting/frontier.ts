@@ -4,7 +4,7 @@
  * and as narrow. They come from the boxes of every division into two, side by side and one under the other; to
  * meet each tree once, the part with the first piece must not itself be divided along the same axis. A state
  * fits a sheet if one of its least boxes does, so one table serves every sheet size on which the pieces may lie
- * the same way. Everyday problems have a few hundred states (median 150 on craft projects), where this beats
+ * the same way. Where it is known how much area may be lost in all, boxes that lose more are left out (Wang). Everyday problems have a few hundred states (median 150 on craft projects), where this beats
  * any search tree; big ones run out of their allowance and are left to local search. (Dynamic programming over
  * subsets with dominance, after Wang, "Two algorithms for constrained two-dimensional cutting stock problems",
  * Operations Research 31, 1983, and Clautiaux, Jouglet & Moukrim, INFORMS J. Computing 25, 2013.)
@@ -39,14 +39,17 @@ export interface Frontier {
 	readonly least: readonly (Least | undefined)[];
 }
 
-/** One table for the sheet kinds `sheets`, on which pieces may lie alike; null where `go` ends first. */
-export function frontierOf(
+/**
+ * One table for the sheet kinds `sheets`, on which pieces may lie alike, of boxes that lose at most `loss`;
+ * pauses after each state.
+ */
+export function* frontierOf(
 	model: Model,
 	states: States,
 	sheets: readonly number[],
-	meter: Meter,
-	go: () => boolean
-): Frontier | null {
+	loss: number,
+	meter: Meter
+): Generator<undefined, Frontier> {
 	const { strides, quantities, size } = states;
 	const limits = outermost(sheets.map((s) => ({ w: model.sheets[s]?.w ?? 0, h: model.sheets[s]?.h ?? 0 })));
 	const room = Math.max(...limits.map(({ w, h }) => w * h));
@@ -57,20 +60,29 @@ export function frontierOf(
 	for (let state = 1; state < size; state++) {
 		area += step(counts, quantities, model);
 		if (area > room) continue;
-		let possible = true;
-		for (let i = 0; i < counts.length && possible; i++) {
-			if ((counts[i] as number) > 0 && state !== strides[i])
-				possible = least[state - (strides[i] as number)] !== undefined;
-		}
-		if (!possible) continue;
+		if (loss === Infinity && !everyPartFits(state, counts, strides, least)) continue;
 		const found =
 			state === strides[strides.indexOf(state)] ? single(model, strides.indexOf(state), may, limits) : [];
-		const pairs = divide(found, state, counts, strides, least, limits);
+		const pairs = divide(found, state, counts, strides, least, limits, area + loss);
 		if (found.length > 0) least[state] = found;
 		meter.spend(pairs + 1);
-		if (!go()) return null;
+		yield;
 	}
 	return { sheets, least };
+}
+
+/** What fits also fits with one piece less. */
+function everyPartFits(
+	state: number,
+	counts: readonly number[],
+	strides: readonly number[],
+	least: readonly (Least | undefined)[]
+): boolean {
+	for (let i = 0; i < counts.length; i++) {
+		const stride = strides[i] as number;
+		if ((counts[i] as number) > 0 && state !== stride && !least[state - stride]) return false;
+	}
+	return true;
 }
 
 /** Counts up by one in the mixed radix; answers by how much the area grew. */
@@ -131,73 +143,107 @@ function keep(found: Least, w: number, h: number, axis: number): void {
 	} else found.splice(at, end - at, w, h, axis);
 }
 
-/** Visits every division of a state into a part with its first piece and the others; answers the number of pairs. */
+/** Meets every division of a state into a part with its first piece and the others; answers the number of pairs. */
 function divide(
 	found: Least,
 	state: number,
 	counts: readonly number[],
 	strides: readonly number[],
 	least: readonly (Least | undefined)[],
-	limits: readonly Size[]
+	limits: readonly Size[],
+	most: number
 ): number {
 	let pairs = 0;
-	eachPart(state, counts, strides, (part) => {
+	const parts = new Parts(state, counts, strides);
+	for (let part = parts.first; part !== state; part = parts.next()) {
 		pairs++;
 		const a = least[part];
-		const b = least[state - part];
-		if (a && b) pairs += join(found, a, b, limits);
-		return false;
-	});
+		const b = a && least[state - part];
+		if (a && b) pairs += joinDown(found, a, b, limits, most) + joinAcross(found, a, b, limits, most);
+	}
 	return pairs;
 }
 
-/** Calls `visit` with each proper sub-multiset that holds the first piece present, until it answers true. */
-function eachPart(
-	state: number,
-	counts: readonly number[],
-	strides: readonly number[],
-	visit: (part: number) => boolean
-): void {
-	const present: number[] = [];
-	for (let i = 0; i < counts.length; i++) if ((counts[i] as number) > 0) present.push(i);
-	const taken = present.map(() => 0);
-	taken[0] = 1;
-	let part = strides[present[0] as number] as number;
-	while (part !== state) {
-		if (visit(part)) return;
-		for (let j = 0; j < present.length; j++) {
-			const i = present[j] as number;
-			if ((taken[j] as number) < (counts[i] as number)) {
-				taken[j] = (taken[j] as number) + 1;
-				part += strides[i] as number;
-				break;
-			}
-			const least = j === 0 ? 1 : 0;
-			part -= ((taken[j] as number) - least) * (strides[i] as number);
-			taken[j] = least;
+/** Counts through the proper sub-multisets that hold the first piece present, and ends with the whole. */
+class Parts {
+	readonly first: number;
+	private readonly strides: number[] = [];
+	private readonly limits: number[] = [];
+	private readonly taken: number[] = [];
+	private part: number;
+
+	constructor(state: number, counts: readonly number[], strides: readonly number[]) {
+		for (let i = 0; i < counts.length; i++) {
+			const count = counts[i] as number;
+			if (count === 0) continue;
+			this.limits.push(this.strides.length === 0 ? count - 1 : count);
+			this.strides.push(strides[i] as number);
+			this.taken.push(0);
 		}
+		this.first = this.part = this.strides[0] ?? state;
+	}
+
+	next(): number {
+		const { taken, limits, strides } = this;
+		for (let j = 0; j < taken.length; j++) {
+			const count = taken[j] as number;
+			const stride = strides[j] as number;
+			if (count < (limits[j] as number)) {
+				taken[j] = count + 1;
+				this.part += stride;
+				return this.part;
+			}
+			taken[j] = 0;
+			this.part -= count * stride;
+		}
+		return this.part;
 	}
 }
 
-function join(found: Least, a: Least, b: Least, limits: readonly Size[]): number {
-	for (let i = 0; i < a.length; i += STEP) {
-		const aw = a[i] as number;
+/**
+ * Adds the boxes of two parts side by side. Only the narrowest pair for each height can be least, so the two
+ * rows are walked down together like a merge; one under the other, it is the same from the other end.
+ */
+function joinDown(found: Least, a: Least, b: Least, limits: readonly Size[], most: number): number {
+	let walked = 0;
+	let i = 0;
+	let j = 0;
+	while (i < a.length && a[i + 2] === DOWN) i += STEP;
+	while (i < a.length && j < b.length) {
 		const ah = a[i + 1] as number;
-		const axis = a[i + 2] as number;
-		for (let j = 0; j < b.length; j += STEP) {
-			const bw = b[j] as number;
-			const bh = b[j + 1] as number;
-			if (axis !== DOWN) {
-				const h = ah > bh ? ah : bh;
-				if (within(limits, aw + bw, h)) keep(found, aw + bw, h, DOWN);
-			}
-			if (axis !== ACROSS) {
-				const w = aw > bw ? aw : bw;
-				if (within(limits, w, ah + bh)) keep(found, w, ah + bh, ACROSS);
-			}
+		const bh = b[j + 1] as number;
+		const w = (a[i] as number) + (b[j] as number);
+		const h = ah > bh ? ah : bh;
+		walked++;
+		if (w * h <= most && within(limits, w, h)) keep(found, w, h, DOWN);
+		if (bh === h) j += STEP;
+		if (ah === h) {
+			i += STEP;
+			while (i < a.length && a[i + 2] === DOWN) i += STEP;
 		}
 	}
-	return (a.length * b.length) / (STEP * STEP);
+	return walked;
+}
+
+function joinAcross(found: Least, a: Least, b: Least, limits: readonly Size[], most: number): number {
+	let walked = 0;
+	let i = a.length - STEP;
+	let j = b.length - STEP;
+	while (i >= 0 && a[i + 2] === ACROSS) i -= STEP;
+	while (i >= 0 && j >= 0) {
+		const aw = a[i] as number;
+		const bw = b[j] as number;
+		const h = (a[i + 1] as number) + (b[j + 1] as number);
+		const w = aw > bw ? aw : bw;
+		walked++;
+		if (w * h <= most && within(limits, w, h)) keep(found, w, h, ACROSS);
+		if (bw === w) j -= STEP;
+		if (aw === w) {
+			i -= STEP;
+			while (i >= 0 && a[i + 2] === ACROSS) i -= STEP;
+		}
+	}
+	return walked;
 }
 
 /** Whether the state fits a `w` x `h` sheet of this table. */
@@ -227,19 +273,17 @@ export function boxOf(
 		const may = model.sheets[frontier.sheets[0] ?? 0]?.may[piece] ?? 0;
 		return leaf(piece, of, !(may & 1 && of.w <= w && of.h <= h));
 	}
-	let box: Box | null = null;
-	eachPart(state, countsOf(states, state), states.strides, (part) => {
+	const parts = new Parts(state, countsOf(states, state), states.strides);
+	for (let part = parts.first; part !== state; part = parts.next()) {
 		const halves = halvesWithin(frontier.least[part], frontier.least[state - part], w, h);
-		if (!halves) return false;
+		if (!halves) continue;
 		const { axis, a, b } = halves;
-		box = along(axis, [
+		return along(axis, [
 			boxOf(model, states, frontier, part, a.w, a.h),
 			boxOf(model, states, frontier, state - part, b.w, b.h)
 		]);
-		return true;
-	});
-	if (!box) throw new Error('no division of a state that is known to fit');
-	return box;
+	}
+	throw new Error('no division of a state that is known to fit');
 }
 
 function halvesWithin(a: Least | undefined, b: Least | undefined, w: number, h: number) {

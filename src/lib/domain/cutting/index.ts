@@ -1,3 +1,4 @@
 export { checkPlan } from './checker';
-export { countCuts, fenceSettings, largestLeftover } from './order';
-export { planCuts } from './plan';
+export { cutMost, type MostCut } from './most';
+export { countCuts, fenceSetting, fenceSettings, largestLeftover } from './order';
+export { planAny, planCuts } from './plan';

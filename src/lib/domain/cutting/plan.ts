@@ -5,8 +5,8 @@
  * of impossibility. What is too big for that is improved by ruin and recreate until it meets the bound or the
  * budget ends.
  */
-import { inequalitiesOf } from './bounds';
-import { Combinations } from './combinations';
+import { areasOf, inequalitiesOf } from './bounds';
+import { Combinations, type Combination } from './combinations';
 import { Patterns } from './exact';
 import { planOf, type Opened } from './layout';
 import { Meter } from './meter';
@@ -15,13 +15,27 @@ import type { CutAnswer, CutBudget, CutProblem } from './problem';
 import { seeded } from './random';
 import { Recreate, type State } from './recreate';
 
+/** Units of work for which one side goes on before the other has its turn. */
+const TURN = 20_000;
+/** Combinations that are listed before the patterns they may need. */
+const BATCH = 200;
 const NOTHING: readonly [number, number] = [0, 0];
 
+/** The plan of least cost that the budget allows, with what is proved of it. */
 export function planCuts(problem: CutProblem, budget: CutBudget): CutAnswer {
+	return answerTo(problem, budget, false);
+}
+
+/** Any plan at all, the first one found: for asking only whether the sheets hold the pieces. */
+export function planAny(problem: CutProblem, budget: CutBudget): CutAnswer {
+	return answerTo(problem, budget, true);
+}
+
+function answerTo(problem: CutProblem, budget: CutBudget, any: boolean): CutAnswer {
 	const model = modelOf(problem);
 	if (model.total === 0)
 		return { status: 'planned', plan: { sheets: [], cost: NOTHING }, minimum: true, bound: NOTHING };
-	const search = new Search(problem, model, budget);
+	const search = new Search(problem, model, budget, any);
 	search.run();
 	return search.answer();
 }
@@ -36,29 +50,44 @@ class Search {
 	constructor(
 		private readonly problem: CutProblem,
 		private readonly model: Model,
-		private readonly budget: CutBudget
+		private readonly budget: CutBudget,
+		private readonly any: boolean
 	) {
 		this.meter = new Meter(budget);
 		this.recreate = new Recreate(model, seeded(budget.seed ?? 1), this.meter);
 	}
 
 	run(): void {
-		const inequalities = inequalitiesOf(this.model, false);
-		const combinations = new Combinations(this.model, inequalities, this.meter);
+		this.raise(new Combinations(this.model, areasOf(this.model), this.meter).bound);
+		if (this.done) return;
+		const start = this.recreate.first((state) => {
+			this.take(state);
+			return this.done || !this.meter.open;
+		});
+		if (this.done) return;
+		const combinations = new Combinations(this.model, inequalitiesOf(this.model, false), this.meter);
 		this.raise(combinations.bound);
-		if (this.done) return;
-		const start = this.recreate.first(() => this.meter.open);
-		this.take(start);
-		if (this.done) return;
-		const patterns = Patterns.of(this.model, this.meter, this.meter.allow(4_000_000));
-		if (patterns) this.prove(patterns, combinations);
-		if (this.done) return;
-		this.recreate.improve(
-			start,
-			this.bound,
-			() => this.meter.open,
-			(state) => this.take(state)
-		);
+		this.alternate(this.climb(start), Patterns.few(this.model) ? this.prove(combinations) : null);
+	}
+
+	/** Search from above and proof from below take turns, since nobody can say which will finish first. */
+	private alternate(above: Iterator<unknown>, below: Iterator<unknown> | null): void {
+		for (let turn = 0; !this.done && this.meter.open; turn++) {
+			const side = below && turn % 2 === 1 ? below : above;
+			const go = this.meter.allow(TURN);
+			while (!this.done && go()) {
+				if (!side.next().done) continue;
+				if (side === below) below = null;
+				break;
+			}
+		}
+	}
+
+	private *climb(start: State): Generator<undefined> {
+		for (const state of this.recreate.improve(start)) {
+			if (state) this.take(state);
+			yield;
+		}
 	}
 
 	answer(): CutAnswer {
@@ -71,26 +100,53 @@ class Search {
 	}
 
 	private get done(): boolean {
-		return this.impossible || (this.best !== null && this.best.cost <= this.bound);
+		return this.impossible || (this.best !== null && (this.any || this.best.cost <= this.bound));
 	}
 
-	private prove(patterns: Patterns, combinations: Combinations): void {
-		const go = () => this.meter.open;
-		for (;;) {
-			const combination = combinations.next(go);
-			if (combination === undefined) return;
-			if (combination === null || (this.best && combination.cost >= this.best.cost)) {
-				this.raise(this.best ? this.best.cost : Infinity);
-				return;
-			}
-			this.raise(combination.cost);
-			const opened = patterns.cover(combination, patterns.full, go);
-			if (opened === undefined) return;
-			if (opened) {
-				this.best = { opened, cost: combination.cost };
-				return;
+	/** Goes through the combinations under the best cost, cheapest first, some at a time. */
+	private *prove(combinations: Combinations): Generator<undefined> {
+		let patterns: Patterns | null = null;
+		let known = -1;
+		while (!this.done) {
+			const batch = yield* this.nextBatch(combinations);
+			if (batch.length === 0) return this.raise(combinations.bound);
+			const loss = this.best ? Math.max(...batch.map((combination) => this.spare(combination))) : Infinity;
+			if (!patterns || loss > known) patterns = yield* Patterns.of(this.model, (known = loss), this.meter);
+			for (const combination of batch) {
+				this.raise(combination.cost);
+				if (this.done) return;
+				yield* this.tryOut(combination, patterns);
 			}
 			this.raise(combinations.bound);
+		}
+	}
+
+	private *nextBatch(combinations: Combinations): Generator<undefined, Combination[]> {
+		const batch: Combination[] = [];
+		while (batch.length < BATCH && combinations.bound < (this.best?.cost ?? Infinity)) {
+			const combination = combinations.next(this.meter.allow(TURN));
+			if (combination === null) break;
+			if (combination && combination.cost < (this.best?.cost ?? Infinity)) batch.push(combination);
+			this.raise(Math.min(batch[0]?.cost ?? Infinity, combinations.bound));
+			yield;
+		}
+		return batch;
+	}
+
+	private spare({ counts }: Combination): number {
+		return counts.reduce(
+			(sum, count, s) => sum + count * (this.model.sheets[s]?.area ?? 0),
+			-this.model.area
+		);
+	}
+
+	private *tryOut(combination: Combination, patterns: Patterns): Generator<undefined> {
+		for (let allowance = TURN; !this.done; allowance *= 2) {
+			const opened = patterns.cover(combination, this.meter.allow(allowance));
+			if (opened && (!this.best || combination.cost < this.best.cost))
+				this.best = { opened, cost: combination.cost };
+			if (opened !== undefined) return;
+			yield;
 		}
 	}
 
@@ -101,7 +157,7 @@ class Search {
 	}
 
 	private raise(bound: number): void {
-		if (bound === Infinity) this.impossible = this.best === null;
+		if (bound === Infinity && !this.best) this.impossible = true;
 		else if (bound > this.bound) this.bound = bound;
 		this.report();
 	}

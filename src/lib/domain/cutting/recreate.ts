@@ -49,30 +49,31 @@ export class Recreate {
 		this.totalArea = model.area;
 	}
 
-	/** The cheapest of the plain constructions; some pieces may be outside. */
-	first(go: () => boolean): State {
+	/** The cheapest of the plain constructions, or the first that is `enough`; some pieces may be outside. */
+	first(enough: (state: State) => boolean): State {
 		const pieces = this.model.pieces.flatMap(({ qty }, p) => Array.from({ length: qty }, () => p));
 		let best: State | null = null;
-		const kinds = this.model.sheets.map((_, s) => s);
-		for (const preferred of [-1, ...kinds]) {
+		for (const preferred of this.favourites()) {
 			for (const measure of MEASURES) {
-				if (best && !go()) return best;
-				const state = this.insert(
-					{ sheets: [], outside: [], cost: 0 },
-					this.sorted(pieces, measure, 0),
-					Infinity,
-					0,
-					preferred
-				);
-				if (
-					!best ||
-					this.value(state) < this.value(best) ||
-					(state.outside.length === 0 && best.outside.length === 0 && state.cost < best.cost)
-				)
-					best = state;
+				const empty = { sheets: [], outside: [], cost: 0 };
+				const state = this.insert(empty, this.sorted(pieces, measure, 0), Infinity, 0, preferred);
+				if (!best || this.less(state, best)) best = state;
+				if (enough(best)) return best;
 			}
 		}
 		return best as State;
+	}
+
+	/** No kind, then each of the largest kinds: which of them to open first is anybody's guess. */
+	private favourites(): number[] {
+		const kinds = this.model.sheets.map((_, s) => s).filter((s) => (this.model.sheets[s]?.count ?? 0) > 0);
+		const area = (s: number) => this.model.sheets[s]?.area ?? 0;
+		return [-1, ...(kinds.length > 1 ? kinds.sort((a, b) => area(b) - area(a) || a - b).slice(0, 6) : [])];
+	}
+
+	private less(a: State, b: State): boolean {
+		const outside = this.value(a) - this.value(b);
+		return outside < 0 || (outside === 0 && a.cost < b.cost);
 	}
 
 	private value({ outside }: State): number {
@@ -81,19 +82,17 @@ export class Recreate {
 		return area;
 	}
 
-	/** Calls `better` with each complete plan under the last one's cost, until `go` ends or none can be cheaper than `bound`. */
-	improve(start: State, bound: number, go: () => boolean, better: (state: State) => void): void {
+	/** Gives complete plans, each cheaper than the last, and null after every turn that found none. Doesn't end by itself. */
+	*improve(start: State): Generator<State | null, void> {
 		let limit = start.outside.length === 0 ? start.cost - 1 : Infinity;
-		if (limit < bound) return;
 		let current = this.under(start, limit);
 		let value = this.value(current) - this.bonus(current);
 		const late = new Array<number>(LATE).fill(value);
-		for (let turn = 0; go(); turn++) {
+		for (let turn = 0; limit >= 0; turn++) {
 			const next = this.turn(current, limit);
 			if (next.outside.length === 0) {
-				better(next);
+				yield next;
 				limit = next.cost - 1;
-				if (limit < bound) return;
 				current = this.under(next, limit);
 				value = this.value(current) - this.bonus(current);
 				late.fill(value);
@@ -106,6 +105,7 @@ export class Recreate {
 				value = nextValue;
 			}
 			late[at] = value;
+			yield null;
 		}
 	}
 
