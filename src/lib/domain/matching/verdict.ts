@@ -32,7 +32,12 @@ export type Shortage =
 	| {
 			readonly line: string;
 			readonly pieces: Readonly<Record<string, number>>;
-			readonly sheets: readonly { readonly w: Length; readonly h: Length; readonly count: number; readonly custom?: boolean }[];
+			readonly sheets: readonly {
+				readonly w: Length;
+				readonly h: Length;
+				readonly count: number;
+				readonly custom?: boolean;
+			}[];
 			readonly certificate?: string;
 	  }
 	| { readonly line: string; readonly amount: number }
