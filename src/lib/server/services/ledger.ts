@@ -22,6 +22,10 @@ export interface Entry {
 	readonly delta: number;
 	readonly why?: string | null;
 	readonly undoes?: string;
+	/** Where the movement comes from an imported ledger: its id, and when it was made by somebody unknown here. */
+	readonly id?: string;
+	readonly at?: number;
+	readonly who?: null;
 }
 
 export interface Effect {
@@ -116,7 +120,7 @@ async function book(tx: Transaction, actor: Actor, act: string, at: number, entr
 		await tx
 			.insert(movements)
 			.values(
-				some.map((entry) => ({ ...entry, id: v7(), roomId: actor.roomId, act, who: actor.userId, at }))
+				some.map((entry) => ({ id: v7(), at, who: actor.userId, ...entry, roomId: actor.roomId, act }))
 			);
 	}
 	const sum = sql`(select sum(${movements.delta}) from ${movements} where ${movements.supplyId} = ${supplies.id})`;

@@ -1,5 +1,5 @@
 import { and, eq, inArray, lt, max, sql } from 'drizzle-orm';
-import { readBill, type BillDocument } from '../../domain/exchange';
+import { billSchema, readBill, type BillDocument } from '../../domain/exchange';
 import type {
 	AddProject,
 	ChooseDesign,
@@ -39,7 +39,7 @@ export async function addProject(tx: Transaction, actor: Actor, input: AddProjec
 	const now = Date.now();
 	await tx.insert(projects).values({
 		...{ id: input.id, roomId: actor.roomId, key, name: bill.name, copies: input.copies },
-		bill: JSON.stringify({ ...bill, key }),
+		bill: billText({ ...bill, key }),
 		position: (last?.position ?? -1) + 1,
 		createdAt: now,
 		updatedAt: now
@@ -122,6 +122,11 @@ export async function restoreProject(tx: Transaction, actor: Actor, id: string):
 	await change(tx, actor, project.id, { deletedAt: null });
 }
 
+/** How a bill is kept: always in the schema's order, so that equal bills are equal texts. */
+export function billText(bill: BillDocument): string {
+	return JSON.stringify(billSchema.parse(bill));
+}
+
 /** A bill that can be read, with the unit of its bare numbers written in. @throws {Invalid} with every issue. */
 async function checked(tx: Transaction, actor: Actor, document: BillDocument): Promise<BillDocument> {
 	const bill = { ...document, units: document.units ?? (await roomUnits(tx, actor)) };
@@ -137,7 +142,7 @@ async function liveProject(tx: Transaction, actor: Actor, id: string): Promise<P
 }
 
 function keepBill(tx: Transaction, actor: Actor, project: ProjectDetail, bill: BillDocument): Promise<void> {
-	const kept = JSON.stringify({ ...bill, key: project.key });
+	const kept = billText({ ...bill, key: project.key });
 	return change(tx, actor, project.id, { bill: kept, name: bill.name, version: project.version + 1 });
 }
 

@@ -4,7 +4,7 @@ import { readSupply } from '../../domain/exchange';
 import { SUPPLY_MEASURES, type ConsumableKind, type Face, type Supply } from '../../domain/stash';
 import { keyFrom } from '../../schemas/key';
 import type { AddPad, AddSupply, EditSupply } from '../../schemas/supplies';
-import type { Transaction } from '../db/client';
+import type { Reader, Transaction } from '../db/client';
 import type { Change } from '../db/schema/ledger';
 import { rooms } from '../db/schema/rooms';
 import { supplies } from '../db/schema/supplies';
@@ -115,8 +115,8 @@ export async function createRows(
 }
 
 /** The columns that differ, before and after; no change where none do. */
-export function differing(row: StoredSupply, wanted: Readonly<Record<string, unknown>>): Change[] {
-	const stored: Readonly<Record<string, unknown>> = row;
+export function differing(row: { readonly id: string }, wanted: Readonly<Record<string, unknown>>): Change[] {
+	const stored: Readonly<Record<string, unknown>> = { ...row };
 	const names = Object.keys(wanted).filter(
 		(name) => JSON.stringify(stored[name]) !== JSON.stringify(wanted[name])
 	);
@@ -126,8 +126,9 @@ export function differing(row: StoredSupply, wanted: Readonly<Record<string, unk
 	return [{ id: row.id, before: of(stored), after: of(wanted) }];
 }
 
-export async function roomUnits(tx: Transaction, actor: Actor): Promise<'in' | 'mm' | 'cm'> {
-	const [room] = await tx.select({ units: rooms.units }).from(rooms).where(eq(rooms.id, actor.roomId));
+/** What a bare number means in this room. */
+export async function roomUnits(db: Reader | Transaction, actor: Actor): Promise<'in' | 'mm' | 'cm'> {
+	const [room] = await db.select({ units: rooms.units }).from(rooms).where(eq(rooms.id, actor.roomId));
 	return room?.units ?? 'in';
 }
 
