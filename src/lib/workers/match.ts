@@ -1,0 +1,33 @@
+import { readMatchRequest, Unreadable, type Issue } from '../domain/exchange';
+import { matchProjects } from '../domain/matching';
+import type { MatchResponse } from '../domain/matching/verdict';
+
+/** What a host is sent: a match request as JSON decodes it, and the day it is asked on (YYYY-MM-DD). */
+export interface MatchQuestion {
+	readonly request: unknown;
+	readonly today: string;
+}
+
+export type MatchReply =
+	| { readonly ok: true; readonly response: MatchResponse }
+	| { readonly ok: false; readonly issues: readonly Issue[] };
+
+/** About what a millisecond of an ordinary processor does; only the clock ends a slower one sooner. */
+const WORK_PER_MS = 20_000;
+
+/** The one entry point of every host. `stopAfter` starts a clock and says when so many milliseconds are over. */
+export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => () => boolean): MatchReply {
+	try {
+		const { budgetMs, ...request } = readMatchRequest(question.request, question.today);
+		const budget = { work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) };
+		return { ok: true, response: matchProjects(request, budget) };
+	} catch (error) {
+		if (error instanceof Unreadable) return { ok: false, issues: error.issues };
+		throw error;
+	}
+}
+
+export function stopByClock(ms: number): () => boolean {
+	const end = performance.now() + ms;
+	return () => performance.now() >= end;
+}
