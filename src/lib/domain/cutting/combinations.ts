@@ -30,6 +30,8 @@ export class Combinations {
 	private readonly better: readonly (readonly number[])[];
 	private readonly ratios: readonly (readonly number[])[];
 	private readonly sharp: readonly Inequality[];
+	/** From each place in the order on, the lowest cost of one sheet. */
+	private readonly cheapest: readonly number[];
 	private made = 0;
 
 	constructor(
@@ -42,6 +44,7 @@ export class Combinations {
 			.map((_, s) => s)
 			.filter((s) => (sheets[s]?.count ?? 0) > 0)
 			.sort((a, b) => area(model, b) - area(model, a) || cost(model, a) - cost(model, b) || a - b);
+		this.cheapest = this.order.map((_, at) => Math.min(...this.order.slice(at).map((s) => cost(model, s))));
 		this.better = sheets.map((_, s) => this.order.filter((other) => dominates(model, other, s)));
 		this.sharp = inequalities
 			.map((inequality) => ({
@@ -108,6 +111,7 @@ export class Combinations {
 				more = Math.max(more, this.price(inequality, missing, last, counts, this.ratios[i] as number[]));
 		});
 		this.meter.spend(this.sharp.length);
+		if (more > 0) more = Math.max(more, this.cheapest[last] ?? Infinity);
 		if (more === Infinity) return;
 		const enough =
 			more === 0 &&
