@@ -6,7 +6,7 @@ import { parseLength } from '../src/lib/domain/length';
 import { openDatabase, type Transaction } from '../src/lib/server/db/client';
 import { readEnv } from '../src/lib/server/env';
 import { hashPassword } from '../src/lib/server/passwords';
-import { importDocument } from '../src/lib/server/services/exchange';
+import { importRoom } from '../src/lib/server/services/exchange';
 import { addUser } from '../src/lib/server/services/people';
 import { attachPicture } from '../src/lib/server/services/pictures';
 import { changeRoomSettings, createRoom, invite, joinRoom } from '../src/lib/server/services/rooms';
@@ -35,12 +35,9 @@ const database = await openDatabase(env.DATABASE_URL);
 await database.migrate('drizzle');
 await database.write(async (tx) => {
 	const actor = await openRoom(tx);
-	await importDocument(tx, actor, {
-		format: 'paperlarder',
-		version: 1,
-		supplies: rows.map(({ supply }) => supply),
-		projects: bills
-	});
+	const supplies = rows.map(({ supply }) => supply);
+	const document = { format: 'paperlarder', version: 1, supplies, projects: bills } as const;
+	await importRoom(tx, actor, { id: v7(), document });
 	for (const [key, { file }] of pictures) await attachPicture(tx, actor, { key, picture: file });
 });
 database.close();

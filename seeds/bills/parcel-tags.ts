@@ -1,6 +1,6 @@
 import type { BillDocument } from '../../src/lib/domain/exchange/bill-schema';
 
-/** Still being worked out: its strip is as wide as the tag, not the mat that it sits on, and the hole's punch is missing. */
+/** Still being worked out: the mat is ⅛ in too wide for an even border, and the punch for the hole isn’t listed. */
 export const parcelTags: BillDocument = {
 	key: 'parcel-tags',
 	name: 'Parcel tags (draft)',
@@ -21,7 +21,7 @@ export const parcelTags: BillDocument = {
 			key: 'mat',
 			slot: 'mat',
 			name: 'Mat',
-			w: '2 1/4 in',
+			w: '2 3/8 in',
 			h: '4 1/4 in',
 			qty: 6,
 			up: 'h',
@@ -31,7 +31,7 @@ export const parcelTags: BillDocument = {
 			key: 'strip',
 			slot: 'strip',
 			name: 'Strip',
-			w: '2 1/2 in',
+			w: '2 in',
 			h: '3/4 in',
 			qty: 6,
 			mount: { on: 'mat' },
@@ -40,7 +40,7 @@ export const parcelTags: BillDocument = {
 	],
 	adhesives: [
 		{ key: 'mats', name: 'Mats to tags', kind: 'runner', need: '78 in' },
-		{ key: 'strips', name: 'Behind the strips', kind: 'tape', width: '1/8 in', need: '30 in' }
+		{ key: 'strips', name: 'Behind the strips', kind: 'tape', width: '1/8 in', need: '24 in' }
 	],
 	tools: [{ key: 'trim', name: 'Trimmer', kind: 'trimmer', reach: '12 in' }],
 	extras: [{ key: 'ties', name: 'Twine ties', kind: 'twine', need: '60 in' }],
