@@ -1,0 +1,115 @@
+import type { Bill, Corner, Fold, Piece } from '../domain/bill/bill';
+import { workOut } from '../domain/bill/formula';
+import { proofread, type Finding } from '../domain/bill/proofreader';
+import { readBill, Unreadable, type BillDocument } from '../domain/exchange';
+import { measureName } from '../domain/exchange/fields';
+import { parseLength, type Length } from '../domain/length';
+import type { Edge } from '../domain/stash';
+import { documentOf, type BillDraft, type PieceDraft } from './bill-draft';
+
+/** What can be drawn of a piece while it is typed. */
+export type Sketch = Pick<Piece, 'name' | 'w' | 'h' | 'up' | 'scores' | 'corners' | 'edges' | 'diagonals'>;
+type Units = 'in' | 'mm' | 'cm';
+
+export interface CheckedDraft {
+	readonly document: Record<string, unknown>;
+	/** By field name; those of the bill as a whole under the empty name. */
+	readonly issues: Readonly<Record<string, string>>;
+	readonly findings: readonly Finding[];
+	/** One for each piece, null where its size can't be read. */
+	readonly sketches: readonly (Sketch | null)[];
+}
+
+/** Reads a draft as the bill that it would be, and tells everything that can be told of it. */
+export function checkDraft(draft: BillDraft, roomUnits: Units): CheckedDraft {
+	const units = unitsOf(draft, roomUnits);
+	const document = documentOf(draft);
+	const { bill, issues } = readDraft(draft, document, units);
+	return {
+		document,
+		issues,
+		findings: bill ? proofread(bill, units) : [],
+		sketches: sketchesOf(draft, units)
+	};
+}
+
+/** A draft that has no issues, as the document that it is. */
+export const billOf = ({ document }: CheckedDraft) => document as BillDocument;
+
+const unitsOf = (draft: BillDraft, roomUnits: Units): Units =>
+	draft.units === 'in' || draft.units === 'mm' || draft.units === 'cm' ? draft.units : roomUnits;
+
+function readDraft(
+	draft: BillDraft,
+	document: Record<string, unknown>,
+	units: Units
+): { bill: Bill | null; issues: Record<string, string> } {
+	const issues = measureIssues(draft);
+	try {
+		const bill = readBill(document, units);
+		return { bill: Object.keys(issues).length > 0 ? null : bill, issues };
+	} catch (trouble) {
+		if (!(trouble instanceof Unreadable)) throw trouble;
+		for (const { path, message } of trouble.issues) issues[fieldOf(path, draft)] ??= message;
+		return { bill: null, issues };
+	}
+}
+
+function measureIssues({ measures }: BillDraft): Record<string, string> {
+	const issues: Record<string, string> = {};
+	const seen = new Set<string>();
+	measures.forEach(({ name: typed, value }, index) => {
+		const name = typed.trim();
+		const read = measureName.safeParse(name);
+		if (name === '' ? value.trim() !== '' : !read.success)
+			issues[`measures.${index}.name`] = read.error?.issues[0]?.message ?? '';
+		else if (name !== '' && seen.has(name))
+			issues[`measures.${index}.name`] = `There is a measure called “${name}” already.`;
+		seen.add(name);
+	});
+	return issues;
+}
+
+/** The document keeps measures by name, the form by row. */
+function fieldOf(path: string, { measures }: BillDraft): string {
+	const [list, name] = path.split('.');
+	if (list !== 'measures' || name === undefined) return path;
+	return `measures.${measures.findLastIndex((row) => row.name.trim() === name)}.value`;
+}
+
+function sketchesOf(draft: BillDraft, units: Units): (Sketch | null)[] {
+	const measures = new Map<string, Length>();
+	const read = (typed: string, zero = false): Length | null => {
+		const text = typed.trimStart();
+		const found = text.startsWith('=')
+			? workOut(text.slice(1), measures, units)
+			: parseLength(text, { unit: units, zero });
+		return found.ok ? found.value : null;
+	};
+	for (const { name, value } of draft.measures) {
+		const length = read(value);
+		if (length !== null) measures.set(name.trim(), length);
+	}
+	return draft.pieces.map((piece) => sketch(piece, read));
+}
+
+function sketch(piece: PieceDraft, read: (typed: string, zero?: boolean) => Length | null): Sketch | null {
+	const [w, h] = [read(piece.w), read(piece.h)];
+	if (w === null || h === null || Math.max(w, h) > 400 * Math.min(w, h)) return null;
+	return {
+		...{ name: piece.name.trim(), w, h, up: piece.up === 'h' || piece.up === 'w' ? piece.up : 'none' },
+		scores: piece.scores.flatMap(({ from, at, fold }) => {
+			const length = read(at);
+			const side = from === 'left' || from === 'right' ? w : h;
+			if (length === null || length >= side) return [];
+			return [{ from: from as Edge, at: length, fold: (fold || 'none') as Fold }];
+		}),
+		corners: piece.corners.map(({ at, tool }) => ({ at: at as Corner[], tool })),
+		edges: piece.edges.map(({ at, tool }) => ({ at: at as Edge[], tool })),
+		diagonals: piece.diagonals.flatMap(({ from, to }) => {
+			const [x1, y1, x2, y2] = [from.x, from.y, to.x, to.y].map((text) => read(text, true));
+			if (x1 == null || y1 == null || x2 == null || y2 == null) return [];
+			return [{ from: { x: x1, y: y1 }, to: { x: x2, y: y2 } }];
+		})
+	};
+}
