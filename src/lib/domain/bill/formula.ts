@@ -10,7 +10,7 @@ import {
 import { add, divide, fraction, multiply, negate, type Fraction } from './fraction';
 
 /** A formula's length as typed, and how deep its brackets and minus signs may nest. */
-export const FORMULA_LIMITS = { characters: 200, depth: 16 } as const;
+const FORMULA_LIMITS = { characters: 200, depth: 16 } as const;
 
 export type Worked =
 	{ readonly ok: true; readonly value: Length } | { readonly ok: false; readonly reason: string };

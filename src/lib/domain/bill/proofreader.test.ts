@@ -435,4 +435,28 @@ describe('keys', () => {
 			{ line: 'pieces/c', rule: 'key-twice', mend: { change: { path: 'pieces.1.key', value: 'c-2' } } }
 		]);
 	});
+
+	it('of tools that a bill made by hand doesn’t list are found', () => {
+		const punched = { key: 'c', w: '6 in', h: '4 in', edges: [{ at: ['top'], tool: 'lace' }] };
+		const listed = readBill(
+			written([punched], {
+				tools: [
+					{ key: 'trim', kind: 'trimmer' },
+					{ key: 'lace', kind: 'edge-punch' }
+				]
+			}),
+			'in'
+		);
+		expect(proofread(listed)).toEqual([]);
+		expect(proofread({ ...listed, tools: listed.tools.slice(0, 1) })).toMatchObject([
+			{
+				line: 'pieces/c',
+				rule: 'punch-not-listed',
+				mend: {
+					text: 'List an edge punch among the tools.',
+					change: { path: 'tools.1', value: { key: 'lace', kind: 'edge-punch' } }
+				}
+			}
+		]);
+	});
 });

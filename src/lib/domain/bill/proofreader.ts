@@ -3,7 +3,9 @@ import { Proof, type Finding, type Units } from './proofreading/finding';
 import { keyFindings, measureFindings } from './proofreading/keys';
 import { markFindings } from './proofreading/marks';
 import { mountFindings } from './proofreading/mounts';
+import { punchFindings } from './proofreading/punches';
 import { slotFindings } from './proofreading/slots';
+import { stepFindings } from './proofreading/steps';
 import { tapeFindings } from './proofreading/tape';
 import { toolFindings } from './proofreading/tools';
 import { wrapFindings } from './proofreading/wraps';
@@ -24,5 +26,7 @@ const FAMILIES = [
 	wrapFindings,
 	markFindings,
 	toolFindings,
+	punchFindings,
+	stepFindings,
 	tapeFindings
 ];

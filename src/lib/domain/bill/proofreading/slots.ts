@@ -90,7 +90,7 @@ function oversize(proof: Proof): Finding[] {
 			line: lineOf(piece),
 			rule: 'piece-oversize',
 			severity: 'ask',
-			message: `“${piece.name}” is ${proof.saySize(piece.w, piece.h)}. The largest sheet commonly sold is about ${proof.saySize(50 * CENTIMETRE, 70 * CENTIMETRE)}.`,
+			message: `“${piece.name}” is ${proof.saySize(piece.w, piece.h)}. The largest sheets commonly sold are about 50 × 70 cm (20 × 26 in).`,
 			mend: { text: 'Check the figures and their unit, or make it from two pieces that join.' }
 		}));
 }
