@@ -30,10 +30,8 @@ interface Journeys {
 }
 
 export const test = base.extend<Journeys>({
-	// eslint-disable-next-line no-empty-pattern
 	baseURL: async ({}, use) => use(process.env.E2E_ORIGIN),
 
-	// eslint-disable-next-line no-empty-pattern
 	person: async ({}, use) => {
 		const email = `${randomUUID()}@makers.example`;
 		await use({ name: 'Tansy Hollis', email, password: 'four sheets of oat card' });
@@ -63,7 +61,6 @@ export const test = base.extend<Journeys>({
 			await page.waitForURL((url) => !url.pathname.startsWith('/sign-in'));
 		}),
 
-	// eslint-disable-next-line no-empty-pattern
 	mail: async ({}, use) =>
 		use(async (to) => {
 			let newest: StoredLetter | undefined;
