@@ -1,14 +1,21 @@
 /**
  * Plans published and everyday instances and reports how near each plan comes to the best known:
- *     npm run bench:cutting -- DIR --budget-ms 200 [--only 2bp|craft|knapsack] [--match TEXT]
+ *     npm run bench:cutting -- DIR --budget-ms 200 [--only craft|2bp|knapsack] [--match TEXT]
  * DIR holds 2bp.json, craft.json and knapsack.json. One JSON line per instance, then one per family.
  */
 import { readFileSync } from 'node:fs';
 import { join } from 'node:path';
 import { performance } from 'node:perf_hooks';
 import { parseArgs } from 'node:util';
-import { checkPlan, countCuts, fenceSettings, largestLeftover, planCuts } from '../../src/lib/domain/cutting';
-import type { CutProblem, Lie, PieceKind, SheetKind } from '../../src/lib/domain/cutting/problem';
+import {
+	bestOfSheet,
+	checkPlan,
+	countCuts,
+	fenceSettings,
+	largestLeftover,
+	planCuts
+} from '../../src/lib/domain/cutting';
+import type { CutPlan, CutProblem, Lie, PieceKind, SheetKind } from '../../src/lib/domain/cutting/problem';
 
 interface Instance {
 	readonly name: string;
@@ -16,6 +23,8 @@ interface Instance {
 	readonly problem: CutProblem;
 	readonly bestKnown: number;
 	readonly proven: boolean;
+	/** For knapsack instances, the worth of each piece: then `bestKnown` and `cost` are values. */
+	readonly values?: readonly number[];
 }
 
 interface Item {
@@ -110,6 +119,32 @@ function crafts(): Instance[] {
 	);
 }
 
+interface Knapsack {
+	readonly name: string;
+	readonly bin: { readonly w: number; readonly h: number };
+	readonly items: readonly (Item & { readonly value: number })[];
+	readonly bestKnown: Readonly<Record<string, number>>;
+}
+
+function knapsacks(): Instance[] {
+	return read<Knapsack[]>('knapsack.json').flatMap(({ name, bin, items, bestKnown }) =>
+		Object.entries(bestKnown).map(([variant, value]): Instance => {
+			const sheets: SheetKind[] = [{ ...bin, count: 1, cost: [1, 0] }];
+			const copies = ({ w, h, qty }: Item) =>
+				variant.startsWith('constrained') ? qty : Math.floor((bin.w * bin.h) / (w * h));
+			const wanted = items.map((item) => ({ ...item, qty: copies(item) }));
+			return {
+				name: `${name}/${variant}`,
+				family: 'knapsack',
+				problem: { sheets, pieces: piecesOf(wanted, sheets, () => (variant.endsWith('R') ? 3 : 1)), kerf: 0 },
+				bestKnown: value,
+				proven: true,
+				values: items.map((item) => item.value)
+			};
+		})
+	);
+}
+
 interface Line {
 	readonly name: string;
 	readonly sheets: number;
@@ -123,9 +158,16 @@ interface Line {
 	readonly leftover: number;
 }
 
-function run({ name, problem, bestKnown }: Instance): Line & { bestKnown: number } {
+function run({ name, problem, bestKnown, values: worth }: Instance): Line & { bestKnown: number } {
 	const started = performance.now();
 	const shouldStop = () => performance.now() - started >= budgetMs;
+	if (worth) {
+		const { value, counts, plan, proved } = bestOfSheet(problem, worth, { work: Infinity, shouldStop });
+		const ms = Math.round((performance.now() - started) * 10) / 10;
+		const cut = { ...problem, pieces: problem.pieces.map((piece, p) => ({ ...piece, qty: counts[p] ?? 0 })) };
+		const found = { name, sheets: 1, cost: value, lowerBound: value, proved, ms, bestKnown };
+		return { ...found, valid: checkPlan(cut, plan).length === 0, ...shape(plan) };
+	}
 	const answer = planCuts(problem, { work: Infinity, shouldStop });
 	const ms = Math.round((performance.now() - started) * 10) / 10;
 	if (answer.status !== 'planned') {
@@ -141,11 +183,13 @@ function run({ name, problem, bestKnown }: Instance): Line & { bestKnown: number
 		proved: answer.minimum,
 		ms,
 		valid: checkPlan(problem, plan).length === 0,
-		cuts: countCuts(plan),
-		fences: fenceSettings(plan),
-		leftover: largestLeftover(plan),
+		...shape(plan),
 		bestKnown
 	};
+}
+
+function shape(plan: CutPlan) {
+	return { cuts: countCuts(plan), fences: fenceSettings(plan), leftover: largestLeftover(plan) };
 }
 
 function median(numbers: readonly number[]): number {
@@ -169,7 +213,9 @@ function totals(family: string, instances: readonly Instance[], lines: readonly 
 		cost,
 		bestKnown,
 		overPercent: Math.round((cost / bestKnown - 1) * 100_000) / 1000,
-		atBestKnown: sum((line, instance) => (line.cost <= instance.bestKnown ? 1 : 0)),
+		atBestKnown: sum((line, { bestKnown, values: worth }) =>
+			(worth ? line.cost >= bestKnown : line.cost <= bestKnown) ? 1 : 0
+		),
 		lowerBound: sum((line) => line.lowerBound),
 		proved: sum((line) => (line.proved ? 1 : 0)),
 		provedUpTo30: `${small.filter((line) => line.proved).length} of ${small.length}`,
@@ -182,9 +228,11 @@ function totals(family: string, instances: readonly Instance[], lines: readonly 
 }
 
 const wanted = (family: string) => family.startsWith(values.only);
-const all = [...(wanted('craft') ? crafts() : []), ...(wanted('2bp') ? packings() : [])].filter(({ name }) =>
-	name.includes(values.match)
-);
+const all = [
+	...(wanted('craft') ? crafts() : []),
+	...(wanted('2bp') ? packings() : []),
+	...(wanted('knapsack') ? knapsacks() : [])
+].filter(({ name }) => name.includes(values.match));
 const families = new Map<string, Instance[]>();
 for (const instance of all)
 	families.set(instance.family, [...(families.get(instance.family) ?? []), instance]);

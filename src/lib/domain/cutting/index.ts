@@ -1,3 +1,4 @@
+export { bestOfSheet, type BestOfSheet } from './best-sheet';
 export { checkPlan } from './checker';
 export { cutMost, type MostCut } from './most';
 export { countCuts, fenceSetting, fenceSettings, largestLeftover } from './order';
