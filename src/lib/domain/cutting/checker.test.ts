@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { checkPlan, planCuts } from '.';
-import { cutProblems } from './problems.fixture';
+import { cutProblems } from '../../../../tests/factories/cut-problems';
 import type { CutPlan, CutProblem, CutSheet, Placement } from './problem';
 
 const planned = cutProblems()

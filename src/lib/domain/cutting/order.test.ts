@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { fenceSetting, fenceSettings, planCuts } from '.';
-import { cutProblems } from './problems.fixture';
+import { cutProblems } from '../../../../tests/factories/cut-problems';
 import type { CutSheet, Rect } from './problem';
 
 const sheets = cutProblems().map((problem) => {

@@ -1,8 +1,8 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
 import { checkPlan, cutMost, planAny, planCuts } from '.';
-import { cutProblems, transposed, scaled } from './problems.fixture';
-import { leastCost } from './oracle.fixture';
+import { cutProblems, transposed, scaled } from '../../../../tests/factories/cut-problems';
+import { leastCost } from '../../../../tests/factories/cut-oracle';
 import type { CutAnswer, CutProblem } from './problem';
 
 const work = 2_000_000;

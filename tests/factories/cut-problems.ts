@@ -1,5 +1,5 @@
 import fc from 'fast-check';
-import type { CutProblem, Lie } from './problem';
+import type { CutProblem, Lie } from '../../src/lib/domain/cutting/problem';
 
 /** Small problems of every sort: several sheet kinds, offcuts, limits, kerf, pieces that may turn here and not there. */
 export function cutProblems(most: { pieces: number } = { pieces: 7 }): fc.Arbitrary<CutProblem> {

@@ -2,7 +2,7 @@
  * The plain oracle: every set of sheets, every way to share the pieces out, every cut at every unit. It shares
  * nothing with the planner, not even the kerf's trick, and is only for problems of a few pieces.
  */
-import type { CutProblem } from './problem';
+import type { CutProblem } from '../../src/lib/domain/cutting/problem';
 
 /** The least cost, or null where the sheets can't hold the pieces. */
 export function leastCost(problem: CutProblem): [number, number] | null {
