@@ -18,9 +18,29 @@ const workers = defineConfig({
 const app = defineConfig({
 	plugins: [tailwindcss(), sveltekit()],
 	test: {
-		include: ['src/**/*.test.ts', 'tests/published/**/*.test.ts', 'tests/services/**/*.test.ts'],
-		environment: 'node',
-		testTimeout: 30_000
+		testTimeout: 30_000,
+		projects: [
+			{
+				extends: true,
+				test: {
+					name: 'unit',
+					include: [
+						'src/**/*.test.ts',
+						'tests/published/**/*.test.ts',
+						'tests/services/**/*.test.ts',
+						'tests/api/**/*.test.ts'
+					]
+				}
+			},
+			{
+				extends: true,
+				test: {
+					name: 'built',
+					include: ['tests/security/**/*.test.ts'],
+					globalSetup: 'tests/setup/server.ts'
+				}
+			}
+		]
 	}
 });
 
