@@ -10,6 +10,7 @@ import type { RoomRole } from '../../src/lib/schemas/rooms';
 import { Browser } from '../security/browser';
 
 export const PASSWORD = 'seven quires of kraft';
+const passwordHashed = hashPassword(PASSWORD);
 
 export interface Person {
 	readonly id: string;
@@ -29,7 +30,7 @@ export async function makePerson(
 	{ room, role = 'owner' }: { room?: string; role?: RoomRole } = {}
 ): Promise<Omit<Person, 'browser'>> {
 	const email = `${v7()}@paperlarder.test`;
-	const passwordHash = await hashPassword(PASSWORD);
+	const passwordHash = await passwordHashed;
 	return db.write(async (tx) => {
 		const id = await addUser(tx, { name: 'Fern', email, passwordHash });
 		const roomId = room ?? v7();

@@ -60,6 +60,16 @@ export class Invalid extends Refusal {
 	}
 }
 
+/** What was sent can't be taken at all: 400 no JSON, 413 too large, 415 another type. */
+export class Unacceptable extends Refusal {
+	constructor(
+		readonly status: 400 | 413 | 415,
+		message: string
+	) {
+		super(message);
+	}
+}
+
 export class TooMany extends Refusal {
 	readonly status = 429;
 	/** @param retryAfter whole seconds */
