@@ -1,0 +1,65 @@
+import { page } from '$lib/server/answer';
+import { reader, write } from '$lib/server/db/client';
+import { namesOfSupplies, papersOfPlan } from '$lib/server/queries/papers';
+import { listProjects } from '$lib/server/queries/projects';
+import { getRoom } from '$lib/server/queries/rooms';
+import { suppliesByKind } from '$lib/server/queries/supplies';
+import { todayFor } from '$lib/server/queries/today';
+import { reorderProjects } from '$lib/server/services/projects';
+import { requireActor } from '$lib/server/session';
+import { error, fail, redirect } from '@sveltejs/kit';
+import { z } from 'zod';
+import type { Actions, PageServerLoad } from './$types';
+import { flapsOf } from './flaps';
+
+export const load: PageServerLoad = page(async (event) => {
+	const actor = await requireActor(event, 'viewer');
+	event.depends('paperlarder:today');
+	const { searchParams } = event.url;
+	const mode = searchParams.get('mode') === 'queue' ? 'queue' : 'each';
+	const on = new Date().toISOString().slice(0, 10);
+	const [room, today, kinds] = await Promise.all([
+		getRoom(reader, actor),
+		todayFor(reader, actor, { mode, on }),
+		suppliesByKind(reader, actor)
+	]);
+	const lifted = today.rows.find(({ project }) => project.key === searchParams.get('lift'));
+	return {
+		mode,
+		on,
+		revision: today.revision,
+		flaps: flapsOf(today),
+		lifted: lifted && {
+			id: lifted.project.id,
+			bill: lifted.project.bill,
+			result: lifted.result,
+			papers: await papersOfPlan(reader, actor, lifted.result),
+			names: await namesOfSupplies(reader, actor, lifted.result)
+		},
+		keep: room.keepOffcut,
+		setUp: room.setUp,
+		stocked: kinds.length > 0,
+		mayChange: actor.role !== 'viewer',
+		mayRun: actor.role === 'owner'
+	} as const;
+});
+
+const moveSchema = z.object({ project: z.uuid(), by: z.coerce.number().pipe(z.literal([-1, 1])) });
+
+export const actions: Actions = {
+	move: page(async (event) => {
+		const actor = await requireActor(event, 'member');
+		const typed = moveSchema.safeParse(Object.fromEntries(await event.request.formData()));
+		if (!typed.success) return fail(400);
+		const { project, by } = typed.data;
+		await write(async (tx) => {
+			const ids = (await listProjects(tx, actor)).map(({ id }) => id);
+			const at = ids.indexOf(project);
+			if (at < 0) error(404, 'That project isn’t in this room any more.');
+			const [moved] = ids.splice(at, 1);
+			ids.splice(Math.max(0, at + by), 0, moved!);
+			await reorderProjects(tx, actor, { projects: ids });
+		});
+		redirect(303, '/today?mode=queue');
+	})
+};
