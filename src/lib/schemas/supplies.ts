@@ -125,5 +125,6 @@ export type AddPad = z.output<typeof addPadSchema>;
 export type Recount = z.output<typeof recountSchema>;
 export type MoveSupplies = z.output<typeof moveSchema>;
 export type TrashSupplies = z.output<typeof trashSchema>;
+export type Movement = z.output<typeof movementSchema>;
 export type UseSupply = z.output<typeof useSchema>;
 export type LendTool = z.output<typeof lendSchema>;

@@ -1,5 +1,5 @@
 import { error, json, redirect, type RequestEvent } from '@sveltejs/kit';
-import { Conflict, Invalid, NoRoom, Refusal, TooMany, Unauthenticated } from './errors';
+import { Conflict, databaseCode, Full, Invalid, NoRoom, Refusal, TooMany, Unauthenticated } from './errors';
 
 /** Wraps a `load` or a form action: a refusal becomes Kit's error page, or the way to the sign-in page. */
 export function page<Event extends RequestEvent | { url: URL }, Result>(
@@ -8,11 +8,12 @@ export function page<Event extends RequestEvent | { url: URL }, Result>(
 	return async (event) => {
 		try {
 			return await work(event);
-		} catch (refusal) {
+		} catch (thrown) {
+			const refusal = refusalIn(thrown);
 			if (refusal instanceof Unauthenticated) redirect(303, signInFor(event.url));
 			if (refusal instanceof NoRoom) redirect(303, '/room/new');
-			if (refusal instanceof Refusal) error(refusal.status, refusal.message);
-			throw refusal;
+			if (refusal) error(refusal.status, refusal.message);
+			throw thrown;
 		}
 	};
 }
@@ -24,9 +25,10 @@ export function api<Event extends RequestEvent>(
 	return async (event) => {
 		try {
 			return await work(event);
-		} catch (refusal) {
-			if (refusal instanceof Refusal) return refuse(refusal);
-			throw refusal;
+		} catch (thrown) {
+			const refusal = refusalIn(thrown);
+			if (refusal) return refuse(refusal);
+			throw thrown;
 		}
 	};
 }
@@ -40,6 +42,15 @@ export function refuse(refusal: Refusal): Response {
 	const headers: HeadersInit =
 		refusal instanceof TooMany ? { 'retry-after': String(refusal.retryAfter) } : {};
 	return json({ message: refusal.message, ...issues, ...current }, { status: refusal.status, headers });
+}
+
+/** What was refused, by us or by the database's own constraints; undefined for a fault. */
+function refusalIn(thrown: unknown): Refusal | undefined {
+	if (thrown instanceof Refusal) return thrown;
+	const code = databaseCode(thrown);
+	if (code?.startsWith('SQLITE_CONSTRAINT'))
+		return new Conflict('That doesn’t go with what is there already.');
+	return code === 'SQLITE_FULL' ? new Full() : undefined;
 }
 
 /** The sign-in page, told where to return to. */

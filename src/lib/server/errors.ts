@@ -70,6 +70,13 @@ export class Unacceptable extends Refusal {
 	}
 }
 
+export class Full extends Refusal {
+	readonly status = 507;
+	constructor(message = 'There is no room left on this server’s disk. Nothing was changed.') {
+		super(message);
+	}
+}
+
 export class TooMany extends Refusal {
 	readonly status = 429;
 	/** @param retryAfter whole seconds */

@@ -1,11 +1,16 @@
 import { readMatchRequest, Unreadable, type Issue } from '../domain/exchange';
 import { matchProjects } from '../domain/matching';
 import type { MatchResponse } from '../domain/matching/verdict';
+import type { Supply } from '../domain/stash';
 
-/** What a host is sent: a match request as JSON decodes it, and the day it is asked on (YYYY-MM-DD). */
+/**
+ * What a host is sent: a match request as JSON decodes it, and the day it is asked on (YYYY-MM-DD). A room's own
+ * supplies come read already, in place of the request's: thousands of them need no writing out.
+ */
 export interface MatchQuestion {
 	readonly request: unknown;
 	readonly today: string;
+	readonly stash?: readonly Supply[];
 }
 
 export type MatchReply =
@@ -20,7 +25,8 @@ export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => 
 	try {
 		const { budgetMs, ...request } = readMatchRequest(question.request, question.today);
 		const budget = { work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) };
-		return { ok: true, response: matchProjects(request, budget) };
+		const supplies = question.stash ?? request.supplies;
+		return { ok: true, response: matchProjects({ ...request, supplies }, budget) };
 	} catch (error) {
 		if (error instanceof Unreadable) return { ok: false, issues: error.issues };
 		throw error;

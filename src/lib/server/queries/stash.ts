@@ -1,6 +1,7 @@
 import { and, eq, getTableColumns, inArray, isNull, or, sql } from 'drizzle-orm';
 import type { Supply } from '../../domain/stash';
 import type { Reader, Transaction } from '../db/client';
+import { rooms } from '../db/schema/rooms';
 import { bins, supplies } from '../db/schema/supplies';
 import { NotFound } from '../errors';
 import type { Actor } from '../session';
@@ -89,4 +90,10 @@ export function freeKey(stem: string, taken: Set<string>): string {
 	for (let number = 2; taken.has(key); number++) key = `${stem.slice(0, 58)}-${number}`;
 	taken.add(key);
 	return key;
+}
+
+/** What a bare number means in this room. */
+export async function roomUnits(db: Reader | Transaction, actor: Actor): Promise<'in' | 'mm' | 'cm'> {
+	const [room] = await db.select({ units: rooms.units }).from(rooms).where(eq(rooms.id, actor.roomId));
+	return room?.units ?? 'in';
 }

@@ -7,6 +7,7 @@ import type { Change } from '../db/schema/ledger';
 import { projects } from '../db/schema/projects';
 import { bins, supplies } from '../db/schema/supplies';
 import { Invalid } from '../errors';
+import { roomUnits } from '../queries/stash';
 import { listBins } from '../queries/supplies';
 import { readable } from '../readable';
 import type { Actor } from '../session';
@@ -14,7 +15,7 @@ import { amountOf, columnsOf } from '../supply-row';
 import { binNamed } from './bins';
 import { perform, requireWriter, type Entry } from './ledger';
 import { billText } from './projects';
-import { createRows, differing, roomUnits } from './supplies';
+import { createRows, differing } from './supplies';
 
 export interface ImportSummary {
 	readonly supplies: { readonly added: number; readonly changed: number; readonly unchanged: number };

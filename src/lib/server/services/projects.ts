@@ -12,13 +12,12 @@ import type { Transaction } from '../db/client';
 import { projects } from '../db/schema/projects';
 import { Conflict, Invalid, NotFound } from '../errors';
 import { listProjects, projectById, type ProjectDetail } from '../queries/projects';
-import { freeKey } from '../queries/stash';
+import { roomUnits, freeKey } from '../queries/stash';
 import { TRASH_DAYS } from '../queries/supplies';
 import { readable } from '../readable';
 import type { Actor } from '../session';
 import { requireWriter } from './ledger';
 import { touchRoom } from './revision';
-import { roomUnits } from './supplies';
 
 /** Adds a project, last in the queue; a second try with the same id adds nothing. */
 export async function addProject(tx: Transaction, actor: Actor, input: AddProject): Promise<{ id: string }> {

@@ -1,17 +1,36 @@
 import { and, eq, lt } from 'drizzle-orm';
 import { Reading } from '../../domain/exchange/reading';
 import type { ConsumableKind } from '../../domain/stash';
-import type { LendTool, MoveSupplies, Recount, TrashSupplies, UseSupply } from '../../schemas/supplies';
+import type {
+	LendTool,
+	Movement,
+	MoveSupplies,
+	Recount,
+	TrashSupplies,
+	UseSupply
+} from '../../schemas/supplies';
 import type { Transaction } from '../db/client';
 import { supplies } from '../db/schema/supplies';
 import { Invalid } from '../errors';
-import { storedSupplies, storedSupply, type StoredSupply } from '../queries/stash';
+import { roomUnits, storedSupplies, storedSupply, type StoredSupply } from '../queries/stash';
 import { TRASH_DAYS } from '../queries/supplies';
 import { readable } from '../readable';
 import type { Actor } from '../session';
 import { binNamed } from './bins';
 import { perform, type Entry } from './ledger';
-import { differing, roomUnits } from './supplies';
+import { differing } from './supplies';
+
+/** Books one line of a supply's ledger, as the API takes it. */
+export function bookMovement(tx: Transaction, actor: Actor, supply: string, input: Movement): Promise<void> {
+	const { id, kind, why } = input;
+	if (kind === 'counted') {
+		const { left, count } = input;
+		return recount(tx, actor, { id, counts: [{ supply, left, count }], why });
+	}
+	if (kind === 'lent') return lendTool(tx, actor, { id, supply, until: input.until, why });
+	if (kind === 'returned') return lendTool(tx, actor, { id, supply, until: null, why });
+	return useSupply(tx, actor, { id, supply, kind, amount: input.amount, why });
+}
 
 /** Says what is there now, for one row or many. */
 export async function recount(tx: Transaction, actor: Actor, input: Recount): Promise<void> {

@@ -1,15 +1,13 @@
-import { eq } from 'drizzle-orm';
 import { v7 } from 'uuid';
 import { readSupply } from '../../domain/exchange';
 import { SUPPLY_MEASURES, type ConsumableKind, type Face, type Supply } from '../../domain/stash';
 import { keyFrom } from '../../schemas/key';
 import type { AddPad, AddSupply, EditSupply } from '../../schemas/supplies';
-import type { Reader, Transaction } from '../db/client';
+import type { Transaction } from '../db/client';
 import type { Change } from '../db/schema/ledger';
-import { rooms } from '../db/schema/rooms';
 import { supplies } from '../db/schema/supplies';
 import { Conflict, Invalid } from '../errors';
-import { freeSupplyKeys, storedSupply, type StoredSupply } from '../queries/stash';
+import { freeSupplyKeys, roomUnits, storedSupply, type StoredSupply } from '../queries/stash';
 import { supplyById } from '../queries/supplies';
 import { readable } from '../readable';
 import type { Actor } from '../session';
@@ -124,12 +122,6 @@ export function differing(row: { readonly id: string }, wanted: Readonly<Record<
 	const of = (from: Readonly<Record<string, unknown>>) =>
 		Object.fromEntries(names.map((name) => [name, from[name]]));
 	return [{ id: row.id, before: of(stored), after: of(wanted) }];
-}
-
-/** What a bare number means in this room. */
-export async function roomUnits(db: Reader | Transaction, actor: Actor): Promise<'in' | 'mm' | 'cm'> {
-	const [room] = await db.select({ units: rooms.units }).from(rooms).where(eq(rooms.id, actor.roomId));
-	return room?.units ?? 'in';
 }
 
 async function read(tx: Transaction, actor: Actor, document: AddSupply['supply']): Promise<Supply> {
