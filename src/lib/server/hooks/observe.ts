@@ -11,7 +11,9 @@ export const observe: Handle = async ({ event, resolve }) => {
 	try {
 		const response = await resolve(event);
 		response.headers.set('x-request-id', event.locals.requestId);
-		if (isPrivate(event, response)) response.headers.set('cache-control', 'no-store');
+		if (isPrivate(event, response) && !response.headers.has('cache-control')) {
+			response.headers.set('cache-control', 'no-store');
+		}
 		note(event, response.status);
 		return response;
 	} catch (thrown) {
