@@ -41,10 +41,10 @@ function pieceArea(box: Box): number {
 	return area;
 }
 
-type Draw = (leaf: Box, sheet: number) => Pick<Placement, 'piece' | 'turned'>;
+type Draw = (leaf: Pick<Box, 'piece' | 'turned'>, sheet: number) => Pick<Placement, 'piece' | 'turned'>;
 
 /** Hands out the caller's pieces, in the caller's order, for the model's. */
-function drawer(problem: CutProblem, model: Model): Draw {
+export function drawer(problem: CutProblem, model: Model): Draw {
 	const left = model.pieces.map(({ members }) => members.map((member) => ({ ...member })));
 	return (leaf, sheet) => {
 		const member = left[leaf.piece]?.find(({ qty }) => qty > 0);

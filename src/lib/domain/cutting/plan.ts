@@ -8,6 +8,7 @@
 import { areasOf, inequalitiesOf } from './bounds';
 import { Combinations, type Combination } from './combinations';
 import { Patterns } from './exact';
+import { planByKnife } from './knife-plan';
 import { planOf, type Opened } from './layout';
 import { Meter } from './meter';
 import { modelOf, splitCost, type Model } from './model';
@@ -37,7 +38,8 @@ function answerTo(problem: CutProblem, budget: CutBudget, any: boolean): CutAnsw
 		return { status: 'planned', plan: { sheets: [], cost: NOTHING }, minimum: true, bound: NOTHING };
 	const search = new Search(problem, model, budget, any);
 	search.run();
-	return search.answer();
+	const answer = search.answer();
+	return problem.interlocked ? planByKnife(problem, model, answer, budget) : answer;
 }
 
 class Search {
