@@ -43,6 +43,7 @@ const env = {
 	AUTH_SECRET: secret(),
 	SMTP_URL: `smtp://127.0.0.1:${mailPort}`,
 	LOG_LEVEL: process.env.LOG_LEVEL || 'warn',
+	SHUTDOWN_TIMEOUT: '2',
 	DEMO: '1'
 };
 

@@ -15,9 +15,11 @@ import { bills } from './bills';
 import cast from './cast.json';
 import { paintStash } from './patterns/paint';
 import { stash } from './stash';
+import { ledger } from './stash/ledger';
 
 const env = readEnv(process.env);
-const rows = stash(new Date().toISOString().slice(0, 10));
+const today = new Date().toISOString().slice(0, 10);
+const rows = stash(today);
 const photos = join(env.DATA_DIR, 'photos');
 await mkdir(photos, { recursive: true });
 
@@ -36,7 +38,8 @@ await database.migrate('drizzle');
 await database.write(async (tx) => {
 	const actor = await openRoom(tx);
 	const supplies = rows.map(({ supply }) => supply);
-	const document = { format: 'paperlarder', version: 1, supplies, projects: bills } as const;
+	const past = ledger(rows, today);
+	const document = { format: 'paperlarder', version: 1, supplies, projects: bills, ledger: past } as const;
 	await importRoom(tx, actor, { id: v7(), document });
 	for (const [key, { file }] of pictures) await attachPicture(tx, actor, { key, picture: file });
 });
