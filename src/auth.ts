@@ -6,6 +6,7 @@ import { reader, write } from '$lib/server/db/client';
 import { env } from '$lib/server/env';
 import { NotFound, TooMany } from '$lib/server/errors';
 import { LIFETIME_MS } from '$lib/server/lifetimes';
+import { audit } from '$lib/server/log';
 import { networkOf } from '$lib/server/network';
 import { checkPassword } from '$lib/server/services/check-password';
 import { redeemSignInLink } from '$lib/server/services/people';
@@ -77,6 +78,7 @@ export async function signIn(
 /** Ends this browser's session and clears what it kept. */
 export async function signOut(event: RequestEvent): Promise<void> {
 	await runAction(event, auth.signOut, {});
+	audit(event, 'sign-out.done');
 	event.setHeaders({ 'clear-site-data': '"cache", "storage"' });
 }
 
@@ -104,6 +106,7 @@ async function letIn(event: RequestEvent, whoIsIt: () => Promise<string | null>)
 			if (before) await endSessionOf(tx, before);
 			return openSession(tx, userId, visitor);
 		});
+		audit(event, 'sign-in.done', { person: userId });
 		return { id: userId, sid };
 	} catch (error) {
 		if (error instanceof TooMany || error instanceof NotFound) throw new NotLetIn(error);

@@ -1,5 +1,7 @@
+import type { RequestEvent } from '@sveltejs/kit';
 import pino, { type Logger } from 'pino';
 import { databaseCode } from './errors';
+import { networkOf } from './network';
 
 /** One JSON line to an event, in UTC. What is logged: ids, codes and route names; never a form, path or mail. */
 export const log: Logger = pino({
@@ -18,4 +20,14 @@ export function describeError(error: unknown): Record<string, unknown> {
 		...(code ? { code } : { reason: error.message.split('\n', 1)[0]?.slice(0, 200) }),
 		at: frames.slice(0, 6).map((line) => line.trim())
 	};
+}
+
+/** Notes who did what to whose access, from where. `detail` holds ids and roles only. */
+export function audit(
+	event: Pick<RequestEvent, 'locals' | 'getClientAddress'>,
+	what: string,
+	detail: Readonly<Record<string, string>> = {}
+): void {
+	const { requestId: request, user } = event.locals;
+	log.info({ request, actor: user?.id ?? null, network: networkOf(event), ...detail }, what);
 }

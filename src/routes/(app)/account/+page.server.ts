@@ -3,6 +3,7 @@ import { page } from '$lib/server/answer';
 import { reader, write } from '$lib/server/db/client';
 import { env } from '$lib/server/env';
 import { refuseCommon, unlessThrottled } from '$lib/server/form-refusals';
+import { audit } from '$lib/server/log';
 import { networkOf } from '$lib/server/network';
 import { hashPassword } from '$lib/server/passwords';
 import { hasPassword, listSessions } from '$lib/server/queries/people';
@@ -55,6 +56,7 @@ export const actions: Actions = {
 			const passwordHash = await hashPassword(password);
 			const sessionId = event.locals.session?.id ?? '';
 			await write((tx) => changePassword(tx, env.ORIGIN, { ...user, sessionId }, passwordHash));
+			audit(event, 'password.changed');
 			return message(form, 'Changed. Your other browsers are signed out.');
 		});
 	}),

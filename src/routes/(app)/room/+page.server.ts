@@ -12,6 +12,7 @@ import { page } from '$lib/server/answer';
 import { reader, write } from '$lib/server/db/client';
 import { env } from '$lib/server/env';
 import { Conflict } from '$lib/server/errors';
+import { audit } from '$lib/server/log';
 import { getRoom, listInvitations, listPeople, listRooms } from '$lib/server/queries/rooms';
 import {
 	changeRole,
@@ -63,6 +64,7 @@ export const actions: Actions = {
 		const form = await superValidate(event.request, zod4(inviteSchema));
 		if (!form.valid) return fail(400);
 		const secret = await write((tx) => invite(tx, actor, form.data.role));
+		audit(event, 'room.invited', { room: actor.roomId, role: form.data.role });
 		return { invitation: `${env.ORIGIN}/join/${secret}` };
 	}),
 
@@ -80,6 +82,7 @@ export const actions: Actions = {
 		if (!form.valid) return fail(400);
 		return orSay(async () => {
 			await write((tx) => changeRole(tx, actor, form.data.person, form.data.role));
+			audit(event, 'room.role-changed', { room: actor.roomId, ...form.data });
 			redirect(303, '/room');
 		});
 	}),
@@ -90,6 +93,7 @@ export const actions: Actions = {
 		if (!form.valid) return fail(400);
 		return orSay(async () => {
 			await write((tx) => removePerson(tx, actor, form.data.person));
+			audit(event, 'room.person-removed', { room: actor.roomId, ...form.data });
 			redirect(303, '/room');
 		});
 	}),
@@ -98,6 +102,7 @@ export const actions: Actions = {
 		const actor = await requireActor(event, 'viewer');
 		return orSay(async () => {
 			await write((tx) => removePerson(tx, actor, actor.userId));
+			audit(event, 'room.left', { room: actor.roomId });
 			redirect(303, '/room/new');
 		});
 	}),

@@ -4,6 +4,7 @@ import { page } from '$lib/server/answer';
 import { reader, write } from '$lib/server/db/client';
 import { env } from '$lib/server/env';
 import { refuseCommon } from '$lib/server/form-refusals';
+import { audit } from '$lib/server/log';
 import { hashPassword } from '$lib/server/passwords';
 import { resetPassword } from '$lib/server/services/people';
 import { findToken } from '$lib/server/services/tokens';
@@ -28,6 +29,7 @@ export const actions: Actions = {
 		await findToken(reader, 'reset', event.params.token);
 		const passwordHash = await hashPassword(password);
 		const email = await write((tx) => resetPassword(tx, env.ORIGIN, event.params.token, passwordHash));
+		audit(event, 'password.reset');
 		await signIn(event, 'password', { email, password });
 		redirect(303, HOME);
 	})
