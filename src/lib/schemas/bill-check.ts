@@ -107,9 +107,9 @@ function sketch(piece: PieceDraft, read: (typed: string, zero?: boolean) => Leng
 		corners: piece.corners.map(({ at, tool }) => ({ at: at as Corner[], tool })),
 		edges: piece.edges.map(({ at, tool }) => ({ at: at as Edge[], tool })),
 		diagonals: piece.diagonals.flatMap(({ from, to }) => {
-			const [x1, y1, x2, y2] = [from.x, from.y, to.x, to.y].map((text) => read(text, true));
-			if (x1 == null || y1 == null || x2 == null || y2 == null) return [];
-			return [{ from: { x: x1, y: y1 }, to: { x: x2, y: y2 } }];
+			const ends = [from, to].map(({ x, y }) => ({ x: read(x, true), y: read(y, true) }));
+			const [start, end] = ends.flatMap(({ x, y }) => (x === null || y === null ? [] : [{ x, y }]));
+			return start && end ? [{ from: start, to: end }] : [];
 		})
 	};
 }
