@@ -55,6 +55,12 @@ export function eachPiece(box: Box | null, visit: (leaf: Box) => void): void {
 	else for (const kid of box.kids) eachPiece(kid, visit);
 }
 
+export function areaIn(box: Box): number {
+	let area = 0;
+	eachPiece(box, ({ w, h }) => (area += w * h));
+	return area;
+}
+
 /** The tree without the leaves that `gone` picks; null where nothing stays. */
 export function without(box: Box, gone: (leaf: Box) => boolean): Box | null {
 	if (box.axis === PIECE) return gone(box) ? null : box;
@@ -78,7 +84,7 @@ export interface Spot {
 }
 
 /** How a fit is judged by the gap along the axis and the gap across it; less is better. */
-export type Judge = (along: number, across: number, w: number, h: number) => number;
+export type Judge = (along: number, across: number) => number;
 
 /**
  * Improves `spot` with the best place for a `w` x `h` piece in `box`, which may grow by `sw` and `sh`. A box
@@ -96,11 +102,11 @@ export function findSpot(
 	spot: Spot
 ): void {
 	if (parent !== DOWN && w <= sw && h <= box.h + sh) {
-		const score = judge(sw - w, box.h + sh - h, w, h);
+		const score = judge(sw - w, box.h + sh - h);
 		if (score < spot.score) put(spot, score, box, DOWN, turned);
 	}
 	if (parent !== ACROSS && h <= sh && w <= box.w + sw) {
-		const score = judge(sh - h, box.w + sw - w, w, h);
+		const score = judge(sh - h, box.w + sw - w);
 		if (score < spot.score) put(spot, score, box, ACROSS, turned);
 	}
 	if (box.axis === DOWN) {

@@ -5,7 +5,7 @@
  * pieces need. Positions are those of the grown model; taking the kerf off again happens where a real length is
  * written.
  */
-import { ACROSS, DOWN, PIECE, along, eachPiece, type Box } from './box';
+import { ACROSS, DOWN, PIECE, along, areaIn, type Box } from './box';
 import { splitCost, type Model } from './model';
 import { trimmerOrder, type CutTree } from './order';
 import {
@@ -25,7 +25,7 @@ export interface Opened {
 
 export function planOf(problem: CutProblem, model: Model, opened: readonly Opened[]): CutPlan {
 	const draw = drawer(problem, model);
-	const sorted = [...opened].sort((a, b) => a.sheet - b.sheet || pieceArea(b.box) - pieceArea(a.box));
+	const sorted = [...opened].sort((a, b) => a.sheet - b.sheet || areaIn(b.box) - areaIn(a.box));
 	return {
 		sheets: sorted.map(({ sheet, box }) => laidOut(model, sheet, box, draw)),
 		cost: splitCost(
@@ -33,12 +33,6 @@ export function planOf(problem: CutProblem, model: Model, opened: readonly Opene
 			opened.reduce((sum, { sheet }) => sum + (model.sheets[sheet]?.cost ?? 0), 0)
 		)
 	};
-}
-
-function pieceArea(box: Box): number {
-	let area = 0;
-	eachPiece(box, ({ w, h }) => (area += w * h));
-	return area;
 }
 
 type Draw = (leaf: Pick<Box, 'piece' | 'turned'>, sheet: number) => Pick<Placement, 'piece' | 'turned'>;
@@ -58,10 +52,20 @@ export function drawer(problem: CutProblem, model: Model): Draw {
 }
 
 function laidOut(model: Model, sheet: number, box: Box, draw: Draw): CutSheet {
-	const { w, h } = model.sheets[sheet] as { w: number; h: number };
-	const carved: Carved = { kerf: model.kerf, draw: (leaf) => draw(leaf, sheet), placements: [], offcuts: [] };
-	const cuts = trimmerOrder(carve(carved, box, 0, 0, w, h));
-	return { sheet, placements: carved.placements, cuts, offcuts: carved.offcuts };
+	const { trees, placements, offcuts } = carveSheet(model, { sheet, box }, (leaf) => draw(leaf, sheet));
+	return { sheet, placements, cuts: trimmerOrder(trees), offcuts };
+}
+
+/** The cuts that free one sheet's pieces, each with those that need it first, and what is left. */
+export function carveSheet(model: Model, { sheet, box }: Opened, draw: Carved['draw'] = asItIs) {
+	const { w, h } = model.sheets[sheet] as Model['sheets'][number];
+	const carved: Carved = { kerf: model.kerf, draw, placements: [], offcuts: [] };
+	const trees = carve(carved, box, 0, 0, w, h);
+	return { trees, placements: carved.placements, offcuts: carved.offcuts };
+}
+
+function asItIs({ piece, turned }: Box): Pick<Placement, 'piece' | 'turned'> {
+	return { piece, turned };
 }
 
 interface Carved {

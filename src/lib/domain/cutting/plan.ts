@@ -9,17 +9,23 @@ import { areasOf, inequalitiesOf } from './bounds';
 import { Combinations, type Combination } from './combinations';
 import { Patterns } from './exact';
 import { planByKnife } from './knife-plan';
-import { planOf, type Opened } from './layout';
+import { carveSheet, planOf, type Opened } from './layout';
 import { Meter } from './meter';
 import { modelOf, splitCost, type Model } from './model';
 import type { CutAnswer, CutBudget, CutProblem } from './problem';
 import { seeded } from './random';
-import { Recreate, type State } from './recreate';
+import { construct } from './construct';
+import { areaIn } from './box';
+import { Inserter, type State } from './insert';
+import { polish } from './polish';
+import { improve } from './recreate';
 
 /** Units of work for which one side goes on before the other has its turn. */
 const TURN = 20_000;
 /** Combinations that are listed before the patterns they may need. */
 const BATCH = 200;
+/** Units for choosing among plans of equal cost. */
+const POLISH = 20_000;
 const NOTHING: readonly [number, number] = [0, 0];
 
 /** The plan of least cost that the budget allows, with what is proved of it. */
@@ -44,7 +50,7 @@ function answerTo(problem: CutProblem, budget: CutBudget, any: boolean): CutAnsw
 
 class Search {
 	private readonly meter: Meter;
-	private readonly recreate: Recreate;
+	private readonly inserter: Inserter;
 	private best: { readonly opened: readonly Opened[]; readonly cost: number } | null = null;
 	private bound = 0;
 	private impossible = false;
@@ -56,13 +62,13 @@ class Search {
 		private readonly any: boolean
 	) {
 		this.meter = new Meter(budget);
-		this.recreate = new Recreate(model, seeded(budget.seed ?? 1), this.meter);
+		this.inserter = new Inserter(model, seeded(budget.seed ?? 1), this.meter);
 	}
 
 	run(): void {
 		this.raise(new Combinations(this.model, areasOf(this.model), this.meter).bound);
 		if (this.done) return;
-		const start = this.recreate.first((state) => {
+		const start = construct(this.inserter, (state) => {
 			this.take(state);
 			return this.done || !this.meter.open;
 		});
@@ -86,7 +92,7 @@ class Search {
 	}
 
 	private *climb(start: State): Generator<undefined> {
-		for (const state of this.recreate.improve(start)) {
+		for (const state of improve(this.inserter, start)) {
 			if (state) this.take(state);
 			yield;
 		}
@@ -95,10 +101,27 @@ class Search {
 	answer(): CutAnswer {
 		const bound = splitCost(this.model, Math.min(this.bound, this.best?.cost ?? this.bound));
 		if (this.best) {
-			const plan = planOf(this.problem, this.model, this.best.opened);
+			const plan = planOf(
+				this.problem,
+				this.model,
+				this.any ? this.best.opened : this.polished(this.best.opened)
+			);
 			return { status: 'planned', plan, minimum: this.best.cost <= this.bound, bound };
 		}
 		return this.impossible ? { status: 'impossible', bound: NOTHING } : { status: 'unknown', bound };
+	}
+
+	/** Even a plan found at the end of the budget gets this much, so that it can be carried out with ease. */
+	private polished(opened: readonly Opened[]): readonly Opened[] {
+		const sheets = opened.map((sheet) => ({ ...sheet, used: areaIn(sheet.box) }));
+		const start = { sheets, outside: [], cost: this.best?.cost ?? 0 };
+		const end = this.meter.spent + POLISH;
+		return polish(
+			this.inserter,
+			start,
+			(sheet) => carveSheet(this.model, sheet),
+			() => this.meter.spent < end
+		).sheets;
 	}
 
 	private get done(): boolean {
