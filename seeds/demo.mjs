@@ -1,21 +1,13 @@
 // `npm run demo`: installs, builds, seeds and serves the demonstration room. Plain Node until it has installed.
 import { spawn } from 'node:child_process';
-import { createHash, randomBytes } from 'node:crypto';
-import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, statSync, writeFileSync } from 'node:fs';
+import { randomBytes } from 'node:crypto';
+import { existsSync, mkdirSync, readdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs';
 import { createServer } from 'node:net';
 import { join } from 'node:path';
 import { setTimeout as pause } from 'node:timers/promises';
-import { bin, checkNode, install, root, runNode } from '../tests/setup/ready.mjs';
+import { bin, checkNode, install, root } from '../tests/setup/ready.mjs';
+import { build } from './build.mjs';
 
-const BUILT_FROM = [
-	'package-lock.json',
-	'svelte.config.js',
-	'vite.config.ts',
-	'tailwind.config.ts',
-	'drizzle',
-	'src',
-	'static'
-];
 const data = join(root, 'data/demo');
 const running = join(data, 'running.json');
 const cast = JSON.parse(readFileSync(join(root, 'seeds/cast.json'), 'utf8'));
@@ -63,34 +55,6 @@ async function refuseTwice() {
 	if (!(await answers(`${other}/healthz`))) return;
 	console.log(`The demonstration is running already, at ${other}`);
 	process.exit(process.argv.includes('--reset') ? 1 : 0);
-}
-
-/** Builds unless what was built last came from exactly these sources. */
-async function build() {
-	const stamp = join(root, 'build/built-from');
-	const sources = hashOf(BUILT_FROM);
-	if (existsSync(stamp) && readFileSync(stamp, 'utf8') === sources) return;
-	console.log('Building…');
-	for (const args of [['build'], ['build', '--mode', 'workers']]) {
-		const code = await runNode('vite/bin/vite.js', [...args, '--logLevel', 'warn']);
-		if (code !== 0) process.exit(code);
-	}
-	writeFileSync(stamp, sources);
-}
-
-function hashOf(paths) {
-	const hash = createHash('sha256');
-	const add = (path) => {
-		const full = join(root, path);
-		if (!existsSync(full)) return;
-		if (statSync(full).isDirectory()) {
-			for (const name of readdirSync(full).sort()) add(join(path, name));
-		} else {
-			hash.update(path).update(readFileSync(full));
-		}
-	};
-	paths.forEach(add);
-	return hash.digest('hex');
 }
 
 /** A secret of this folder's own, so that sign-ins outlive a restart. */
