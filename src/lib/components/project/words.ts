@@ -1,13 +1,11 @@
 import type { BillDocument } from '$lib/domain/exchange';
 import { formatLength, formatSize, type Length } from '$lib/domain/length';
 import type { LineResult, NearMiss, ProjectResult, Shortage } from '$lib/domain/matching/verdict';
-import { SUPPLY_MEASURES, type ConsumableKind, type SupplyKind } from '$lib/domain/stash';
+import { SUPPLY_MEASURES, type ConsumableKind } from '$lib/domain/stash';
 import { formatVolume } from '$lib/domain/volume';
+import { kindWords } from '$lib/components/supply/kinds';
 import { dayOf } from '$lib/components/ui/verdict-words';
 import type { Units } from '$lib/components/ui/units';
-
-/** A kind as it is said in a sentence: `corner punch`, `patterned paper`. */
-export const kindWords = (kind: string) => kind.replaceAll('-', ' ');
 
 export const count = (n: number, one: string, many = `${one}s`) => `${n} ${n === 1 ? one : many}`;
 
@@ -15,17 +13,17 @@ export const count = (n: number, one: string, many = `${one}s`) => `${n} ${n ===
 export function lineName(bill: BillDocument, line: string): string {
 	if (line === 'tools/board-cut') return 'A tool that cuts board';
 	const [list, key] = line.split('/');
-	if (list === 'slots') return bill.slots.find((slot) => slot.key === key)?.name ?? capital(key);
+	if (list === 'slots') return bill.slots.find((slot) => slot.key === key)?.name ?? kindWords(key ?? '');
 	if (list === 'tools') {
 		const tool = bill.tools?.find((known) => known.key === key);
-		return tool?.name ?? capital(tool && kindWords(tool.kind));
+		return tool?.name ?? kindWords(tool?.kind ?? '');
 	}
 	const need = consumable(bill, line);
-	return need?.name ?? capital(need && kindWords(need.kind));
+	return need?.name ?? kindWords(need?.kind ?? '');
 }
 
 export const pieceName = (bill: BillDocument, key: string) =>
-	bill.pieces.find((piece) => piece.key === key)?.name ?? capital(key);
+	bill.pieces.find((piece) => piece.key === key)?.name ?? kindWords(key ?? '');
 
 /** The one line on a flap's edge: what it takes, or what stands in its way first. */
 export function edgeWords(bill: BillDocument, result: ProjectResult): string {
@@ -60,10 +58,10 @@ function makings(bill: BillDocument, { plan, copies }: ProjectResult): string {
 
 /** What a shortage asks for: sheets of a size, a tool, or so much of a roll, bottle or box. */
 export function wantedWords(bill: BillDocument, shortage: Shortage, units: Units): string {
-	if ('tool' in shortage) return `No ${kindWords(shortage.tool)} that serves`;
+	if ('tool' in shortage) return `No ${inSentence(shortage.tool)} that serves`;
 	if ('amount' in shortage) {
 		const need = consumable(bill, shortage.line);
-		return `${amountWords(need?.kind, shortage.amount, units)} more ${kindWords(need?.kind ?? '')}`;
+		return `${amountWords(need?.kind, shortage.amount, units)} more ${inSentence(need?.kind ?? '')}`;
 	}
 	const sheets = shortage.sheets.map(
 		({ w, h, count: n, custom }) =>
@@ -118,7 +116,4 @@ function consumable(bill: BillDocument, line: string) {
 	return lines?.find((need) => need.key === key);
 }
 
-function capital(words: SupplyKind | string | undefined): string {
-	const said = kindWords(words ?? '');
-	return said.charAt(0).toUpperCase() + said.slice(1);
-}
+const inSentence = (kind: string) => kindWords(kind).toLowerCase();

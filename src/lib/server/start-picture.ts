@@ -1,0 +1,25 @@
+import type { ProjectResult } from '../domain/matching/verdict';
+import { STARTERS } from '../starter';
+import { EXAMPLE_STASH } from '../starter/example';
+import { today } from './clock';
+import { Invalid } from './errors';
+import { matcher } from './matcher';
+
+let worked: Promise<readonly ProjectResult[]> | null = null;
+
+/** What the start page's drawer makes of the starter projects: worked out once by the matcher, as for anybody. */
+export function startPicture(): Promise<readonly ProjectResult[]> {
+	worked ??= workOut().catch((error) => {
+		worked = null;
+		throw error;
+	});
+	return worked;
+}
+
+async function workOut(): Promise<readonly ProjectResult[]> {
+	const request = { projects: STARTERS.map(({ bill }) => bill), supplies: EXAMPLE_STASH };
+	const reply = await matcher.ask({ request, today: today() }, 2000, 'room');
+	if (!reply.ok)
+		throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
+	return reply.response.results;
+}
