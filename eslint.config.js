@@ -9,7 +9,10 @@ const domainOnly = {
 			regex: '^(?!\\.{1,2}/|zod$)',
 			message: 'The domain imports only itself and zod.'
 		},
-		{ group: ['**/server/**', '**/components/**', '**/schemas/**'], message: 'The domain imports only itself.' }
+		{
+			group: ['**/server/**', '**/components/**', '**/schemas/**'],
+			message: 'The domain imports only itself.'
+		}
 	]
 };
 
@@ -36,7 +39,16 @@ export default ts.config(
 		ignores: ['**/*.test.ts'],
 		rules: {
 			'no-restricted-imports': ['error', domainOnly],
-			'no-restricted-globals': ['error', 'process', 'window', 'document', 'fetch', 'setTimeout', 'performance', 'crypto'],
+			'no-restricted-globals': [
+				'error',
+				'process',
+				'window',
+				'document',
+				'fetch',
+				'setTimeout',
+				'performance',
+				'crypto'
+			],
 			'no-restricted-properties': [
 				'error',
 				{ object: 'Math', property: 'random', message: 'The domain takes a seed.' },
