@@ -165,7 +165,7 @@ describe('cutting a plan', () => {
 		});
 		await cut(actor, cardsId, stripped);
 		const offcuts = (await stashOf(actor)).filter(({ offcut, key }) => offcut && key.startsWith('kite'));
-		expect(offcuts.map(({ h }) => h / INCH)).toEqual([4.25, 7.75]);
+		expect(offcuts.map(({ h }) => h! / INCH)).toEqual([4.25, 7.75]);
 	});
 });
 

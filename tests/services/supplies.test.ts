@@ -227,7 +227,7 @@ describe('whose it is', () => {
 		const owner = await makeRoom(db);
 		const viewer = await joinRoom(db, owner.roomId, 'viewer');
 		const id = await stock(db, owner, cardstock({ price: { amount: 95, currency: 'USD' } }));
-		expect(JSON.stringify(await supplyById(db.reader, viewer, id))).not.toMatch(/price|95|USD/i);
+		expect(JSON.stringify(await supplyById(db.reader, viewer, id))).not.toMatch(/price|USD/i);
 		expect(JSON.stringify(await list(viewer))).not.toMatch(/price|USD/i);
 		expect(await supplyById(db.reader, owner, id)).toMatchObject({ price: { amount: 95 } });
 		await expect(

@@ -1,16 +1,16 @@
 import { readMatchRequest, Unreadable, type Issue } from '../domain/exchange';
 import { matchProjects } from '../domain/matching';
 import type { MatchResponse } from '../domain/matching/verdict';
-import type { Supply } from '../domain/stash';
+import { readStash } from '../domain/stash-row';
 
 /**
  * What a host is sent: a match request as JSON decodes it, and the day it is asked on (YYYY-MM-DD). A room's own
- * supplies come read already, in place of the request's: thousands of them need no writing out.
+ * supplies come as the text of their rows, in place of the request's.
  */
 export interface MatchQuestion {
 	readonly request: unknown;
 	readonly today: string;
-	readonly stash?: readonly Supply[];
+	readonly stash?: string;
 }
 
 export type MatchReply =
@@ -25,7 +25,7 @@ export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => 
 	try {
 		const { budgetMs, ...request } = readMatchRequest(question.request, question.today);
 		const budget = { work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) };
-		const supplies = question.stash ?? request.supplies;
+		const supplies = question.stash === undefined ? request.supplies : readStash(question.stash);
 		return { ok: true, response: matchProjects({ ...request, supplies }, budget) };
 	} catch (error) {
 		if (error instanceof Unreadable) return { ok: false, issues: error.issues };

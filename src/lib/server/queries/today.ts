@@ -7,7 +7,7 @@ import { Invalid, NotFound } from '../errors';
 import { matcher, type Matcher } from '../matcher';
 import type { Actor } from '../session';
 import { listProjects, type ProjectRow } from './projects';
-import { stashForMatching } from './stash';
+import { stashText } from './stash';
 
 export interface Asking {
 	readonly mode: 'each' | 'queue';
@@ -90,7 +90,7 @@ async function rank(
 			keepOffcut: keepOffcut === null ? null : writeExact(keepOffcut, 'mm')
 		}
 	};
-	const stash = await stashForMatching(db, actor);
+	const stash = await stashText(db, actor);
 	const reply = await by.ask({ request, today: on, stash }, BUDGET_MS, 'room');
 	if (!reply.ok)
 		throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));

@@ -19,3 +19,14 @@ export async function binNamed(
 		.where(and(eq(bins.roomId, actor.roomId), eq(bins.name, name)));
 	return bin?.id ?? null;
 }
+
+/** The same for many rows: each name's id, null for none. */
+export async function binsNamed(
+	tx: Transaction,
+	actor: Actor,
+	names: readonly (string | null)[]
+): Promise<Map<string | null, string | null>> {
+	const ids = new Map<string | null, string | null>();
+	for (const name of new Set(names)) ids.set(name, await binNamed(tx, actor, name));
+	return ids;
+}

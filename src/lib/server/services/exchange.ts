@@ -9,10 +9,11 @@ import { bins, supplies } from '../db/schema/supplies';
 import { Invalid } from '../errors';
 import { roomUnits } from '../queries/stash';
 import { listBins } from '../queries/supplies';
+import { inLots } from '../in-lots';
 import { readable } from '../readable';
 import type { Actor } from '../session';
 import { amountOf, columnsOf } from '../supply-row';
-import { binNamed } from './bins';
+import { binNamed, binsNamed } from './bins';
 import { perform, requireWriter, type Entry } from './ledger';
 import { billText } from './projects';
 import { createRows, differing } from './supplies';
@@ -45,10 +46,15 @@ export async function importRoom(
 	const plan = await planImport(tx, actor, input.document);
 	await perform(tx, actor, { id: input.id, kind: 'import' }, async (at) => {
 		for (const name of plan.bins) await binNamed(tx, actor, name);
+		const binIds = await binsNamed(
+			tx,
+			actor,
+			plan.changed.map(({ supply }) => supply.bin)
+		);
 		const changes: Change[] = [];
 		const entries: Entry[] = [];
 		for (const { row, supply } of plan.changed) {
-			const wanted = { ...columnsOf(supply), binId: await binNamed(tx, actor, supply.bin), deletedAt: null };
+			const wanted = { ...columnsOf(supply), binId: binIds.get(supply.bin), deletedAt: null };
 			changes.push(...differing(row, wanted));
 			const delta = amountOf(supply) - row.amount;
 			if (delta !== 0) entries.push({ supplyId: row.id, kind: 'counted', delta });
@@ -140,15 +146,15 @@ async function knownSupplies(
 	wanted: readonly Supply[]
 ): Promise<Map<string, SupplyRow>> {
 	const known = new Map<string, SupplyRow>();
-	for (let start = 0; start < wanted.length; start += 1000) {
-		const keys = wanted.slice(start, start + 1000).map(({ key }) => key);
+	await inLots(wanted, 500, async (some) => {
+		const keys = some.map(({ key }) => key);
 		const rows = await db
 			.select()
 			.from(supplies)
 			.leftJoin(bins, eq(bins.id, supplies.binId))
 			.where(and(eq(supplies.roomId, actor.roomId), inArray(supplies.key, keys)));
 		for (const { supplies: row, bins: bin } of rows) known.set(row.key, { ...row, bin: bin?.name ?? null });
-	}
+	});
 	return known;
 }
 

@@ -5,6 +5,7 @@ import { acts, movements } from '../db/schema/ledger';
 import type { ACT_KINDS, Change, MOVEMENT_KINDS } from '../db/schema/ledger';
 import { supplies } from '../db/schema/supplies';
 import { Conflict, Forbidden, NotFound } from '../errors';
+import { inLots } from '../in-lots';
 import type { Actor } from '../session';
 import { touchRoom } from './revision';
 
@@ -103,26 +104,28 @@ async function apply(tx: Transaction, actor: Actor, changes: readonly Change[]):
 		alike.set(after, [...(alike.get(after) ?? []), change]);
 	}
 	for (const group of alike.values()) {
-		for (const some of inLots(group)) {
-			const ids = some.map(({ id }) => id);
-			await tx
+		await inLots(group, LOT, (some) =>
+			tx
 				.update(supplies)
 				.set({ ...some[0]?.after, version: sql`${supplies.version} + 1` })
-				.where(and(eq(supplies.roomId, actor.roomId), inArray(supplies.id, ids)));
-		}
+				.where(
+					ownRows(
+						actor,
+						some.map(({ id }) => id)
+					)
+				)
+		);
 	}
 }
 
 async function book(tx: Transaction, actor: Actor, act: string, at: number, entries: readonly Entry[]) {
 	if (entries.length === 0) return;
 	await refuseOverdraft(tx, actor, entries);
-	for (const some of inLots(entries)) {
-		await tx
+	await inLots(entries, LOT, (some) =>
+		tx
 			.insert(movements)
-			.values(
-				some.map((entry) => ({ id: v7(), at, who: actor.userId, ...entry, roomId: actor.roomId, act }))
-			);
-	}
+			.values(some.map((entry) => ({ id: v7(), at, who: actor.userId, ...entry, roomId: actor.roomId, act })))
+	);
 	const sum = sql`(select sum(${movements.delta}) from ${movements} where ${movements.supplyId} = ${supplies.id})`;
 	await tx
 		.update(supplies)
@@ -139,29 +142,26 @@ async function refuseOverdraft(tx: Transaction, actor: Actor, entries: readonly 
 	const taken = new Map<string, number>();
 	for (const { supplyId, delta } of entries) taken.set(supplyId, (taken.get(supplyId) ?? 0) + delta);
 	const drawn = [...taken].filter(([, delta]) => delta < 0).map(([id]) => id);
-	for (const some of inLots(drawn)) {
+	await inLots(drawn, LOT, async (some) => {
 		const rows = await tx
 			.select({ id: supplies.id, name: supplies.name, amount: supplies.amount })
 			.from(supplies)
-			.where(and(eq(supplies.roomId, actor.roomId), inArray(supplies.id, some)));
+			.where(ownRows(actor, some));
 		for (const { id, name, amount } of rows) {
-			if (amount + (taken.get(id) ?? 0) < 0) throw new Conflict(`There isn't that much of ${name} left.`);
+			if (amount + (taken.get(id) ?? 0) < 0) throw new Conflict(`There isn’t that much of ${name} left.`);
 		}
-	}
+	});
 }
 
 async function refuseStale(tx: Transaction, actor: Actor, changes: readonly Change[]): Promise<void> {
-	for (const some of inLots(changes)) {
+	await inLots(changes, LOT, async (some) => {
 		const rows = await tx
 			.select()
 			.from(supplies)
 			.where(
-				and(
-					eq(supplies.roomId, actor.roomId),
-					inArray(
-						supplies.id,
-						some.map(({ id }) => id)
-					)
+				ownRows(
+					actor,
+					some.map(({ id }) => id)
 				)
 			);
 		const byId = new Map(rows.map((row) => [row.id, row as Record<string, unknown>]));
@@ -173,12 +173,12 @@ async function refuseStale(tx: Transaction, actor: Actor, changes: readonly Chan
 				throw new Conflict('It has been changed since, so it can no longer be undone.');
 			}
 		}
-	}
+	});
 }
 
-/** SQLite binds at most 32,766 values in a statement. */
-function inLots<T>(items: readonly T[]): T[][] {
-	const lots: T[][] = [];
-	for (let start = 0; start < items.length; start += 1000) lots.push(items.slice(start, start + 1000));
-	return lots;
+function ownRows(actor: Actor, ids: readonly string[]) {
+	return and(eq(supplies.roomId, actor.roomId), inArray(supplies.id, [...ids]));
 }
+
+/** SQLite binds at most 32,766 values in a statement; a movement has ten. */
+const LOT = 500;

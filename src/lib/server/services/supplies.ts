@@ -9,10 +9,11 @@ import { supplies } from '../db/schema/supplies';
 import { Conflict, Invalid } from '../errors';
 import { freeSupplyKeys, roomUnits, storedSupply, type StoredSupply } from '../queries/stash';
 import { supplyById } from '../queries/supplies';
+import { inLots } from '../in-lots';
 import { readable } from '../readable';
 import type { Actor } from '../session';
 import { amountOf, columnsOf } from '../supply-row';
-import { binNamed } from './bins';
+import { binNamed, binsNamed } from './bins';
 import { perform, type Effect, type Entry } from './ledger';
 
 /** Adds a row; the act that undoing it names has the supply's own id. */
@@ -87,21 +88,22 @@ export async function createRows(
 	rows: readonly NewRow[],
 	kind?: Entry['kind']
 ): Promise<Required<Effect>> {
-	const binIds = new Map<string | null, string | null>();
-	for (const { supply } of rows) {
-		if (!binIds.has(supply.bin)) binIds.set(supply.bin, await binNamed(tx, actor, supply.bin));
-	}
-	for (let start = 0; start < rows.length; start += 200) {
-		await tx.insert(supplies).values(
-			rows.slice(start, start + 200).map(({ id, key, supply, picture }) => ({
+	const binIds = await binsNamed(
+		tx,
+		actor,
+		rows.map(({ supply }) => supply.bin)
+	);
+	await inLots(rows, 200, (some) =>
+		tx.insert(supplies).values(
+			some.map(({ id, key, supply, picture }) => ({
 				...columnsOf(supply),
 				...{ id, key, picture },
 				roomId: actor.roomId,
 				binId: binIds.get(supply.bin) ?? null,
 				createdAt: at
 			}))
-		);
-	}
+		)
+	);
 	return {
 		changes: rows.map(({ id }) => ({ id, before: { deletedAt: at }, after: { deletedAt: null } })),
 		entries: rows.map(({ id, supply }) => ({
