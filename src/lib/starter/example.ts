@@ -25,12 +25,14 @@ const PAPERS: readonly SupplyDocument[] = [
 	}
 ];
 
-/** Everybody's kit, save that nobody has counted the glue dots. */
+/** Everybody's kit, save that nobody counted the glue dots and there is no corner punch. */
 const KIT = new Map(
-	STARTERS.flatMap(({ kit }) => kit).map((supply) => [
-		supply.key,
-		supply.kind === 'glue-dots' ? { ...supply, count: 'unsure' as const } : supply
-	])
+	STARTERS.flatMap(({ kit }) => kit)
+		.filter(({ kind }) => kind !== 'corner-punch')
+		.map((supply) => [
+			supply.key,
+			supply.kind === 'glue-dots' ? { ...supply, count: 'unsure' as const } : supply
+		])
 );
 
 export const EXAMPLE_PAPERS = PAPERS;
