@@ -35,7 +35,13 @@ export const useSheetsSchema = z.object({
 	id: idField,
 	project: idField,
 	plan: shownPlanSchema,
-	bin: nameField.nullable().default(null)
+	bin: nameField.nullable().default(null),
+	/** Which offcuts are filed, each as its sheet's and its own number in the plan: `0.2`. Null keeps by the room's rule. */
+	kept: z
+		.array(z.string().regex(/^\d{1,4}\.\d{1,4}$/))
+		.max(10_000)
+		.nullable()
+		.default(null)
 });
 
 export type UseSheets = z.output<typeof useSheetsSchema>;

@@ -22,7 +22,7 @@ import { createRows, type NewRow } from './supplies';
  * @throws {Conflict} where they no longer bear it. @throws {Invalid} where it could never be cut.
  */
 export async function useSheets(tx: Transaction, actor: Actor, input: UseSheets): Promise<void> {
-	const { id, project, plan, bin } = input;
+	const { id, project, plan, bin, kept } = input;
 	await perform(tx, actor, { id, kind: 'cut', projectId: project }, async (at) => {
 		const owned = await sheetsNamed(tx, actor, plan.sheets);
 		const bills = await billsNamed(tx, actor, project, plan.sheets);
@@ -32,7 +32,8 @@ export async function useSheets(tx: Transaction, actor: Actor, input: UseSheets)
 		if (faults.length > 0)
 			throw new Invalid([{ path: ['plan'], message: 'This plan can’t be cut as it is drawn.' }]);
 
-		const offcuts = offcutsOf(plan.sheets, owned, await smallestKept(tx, actor), bin);
+		const keeps = kept ? keepsNamed(kept) : keepsFrom(await smallestKept(tx, actor));
+		const offcuts = offcutsOf(plan.sheets, owned, keeps, bin);
 		const keys = await freeSupplyKeys(
 			tx,
 			actor,
@@ -104,21 +105,35 @@ function taken(sheets: readonly ShownSheet[], owned: ReadonlyMap<string, OwnedSh
 function offcutsOf(
 	sheets: readonly ShownSheet[],
 	owned: ReadonlyMap<string, OwnedSheet>,
-	smallest: number,
+	keeps: Keeps,
 	bin: string | null
 ): NewRow[] {
 	const rows = new Map<string, NewRow & { supply: SheetSupply }>();
-	for (const { supply: key, offcuts } of sheets) {
+	sheets.forEach(({ supply: key, offcuts }, sheet) => {
 		const { supply, picture } = owned.get(key)!;
-		for (const { w, h } of offcuts) {
-			if (Math.min(w, h) < smallest) continue;
+		offcuts.forEach((offcut, nth) => {
+			if (!keeps(offcut, `${sheet}.${nth}`)) return;
+			const { w, h } = offcut;
 			const same = `${key} ${w} ${h}`;
 			const count = (rows.get(same)?.supply.sheets ?? 0) + 1;
 			const left = offcutOf(supply, w, h, count, bin);
 			rows.set(same, { id: rows.get(same)?.id ?? v7(), key: left.key, supply: left, picture });
-		}
-	}
+		});
+	});
 	return [...rows.values()];
+}
+
+/** Whether an offcut is filed, by its size or by its number in the plan. */
+type Keeps = (offcut: { readonly w: number; readonly h: number }, number: string) => boolean;
+
+const keepsFrom =
+	(smallest: number): Keeps =>
+	({ w, h }) =>
+		Math.min(w, h) >= smallest;
+
+function keepsNamed(numbers: readonly string[]): Keeps {
+	const named = new Set(numbers);
+	return (_, number) => named.has(number);
 }
 
 function offcutOf(whole: SheetSupply, w: number, h: number, sheets: number, bin: string | null): SheetSupply {

@@ -8,10 +8,10 @@ import { reader, write } from '$lib/server/db/client';
 import { NotFound } from '$lib/server/errors';
 import { doneAct } from '$lib/server/queries/acts';
 import { namesOfSupplies } from '$lib/server/queries/papers';
-import { projectById } from '$lib/server/queries/projects';
+import { planFor } from '$lib/server/queries/plan';
+import { projectById, type ProjectDetail } from '$lib/server/queries/projects';
 import { getRoom } from '$lib/server/queries/rooms';
 import { stashForMatching } from '$lib/server/queries/stash';
-import { todayForProject } from '$lib/server/queries/today';
 import { chooseDesign, setCopies, trashProject } from '$lib/server/services/projects';
 import { requireActor, type Actor } from '$lib/server/session';
 import { orSay } from '$lib/server/or-say';
@@ -37,7 +37,7 @@ export const load: PageServerLoad = page(async (event) => {
 		bill,
 		cautions: cautionsFor(bill),
 		choices: designsFor(bill, await stashForMatching(reader, actor)),
-		match: await soon(matchOf(actor, project.id), searchParams.has('wait')),
+		match: await soon(matchOf(actor, project), searchParams.has('wait')),
 		kept: searchParams.has('kept'),
 		done: await doneAct(reader, actor, searchParams.get('did')),
 		request: v7(),
@@ -95,7 +95,7 @@ function parsed(text: string): unknown {
 	}
 }
 
-async function matchOf(actor: Actor, id: string) {
-	const { result } = await todayForProject(reader, actor, id, { mode: 'each', on: today() });
+async function matchOf(actor: Actor, project: ProjectDetail) {
+	const result = await planFor(reader, actor, project, today());
 	return { result, names: await namesOfSupplies(reader, actor, result) };
 }
