@@ -13,7 +13,7 @@ export class Meter {
 	/** Adds `units`; false once the work is used up or the host says stop. */
 	spend(units: number): boolean {
 		this.spent += units;
-		if (this.spent >= this.nextPoll) {
+		if (!this.stopped && this.spent >= this.nextPoll) {
 			this.nextPoll = this.spent + POLL;
 			if (this.budget.shouldStop?.()) this.stopped = true;
 		}

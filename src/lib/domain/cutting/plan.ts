@@ -24,8 +24,8 @@ import { improve } from './recreate';
 const TURN = 20_000;
 /** Combinations that are listed before the patterns they may need. */
 const BATCH = 200;
-/** Units for choosing among plans of equal cost. */
-const POLISH = 20_000;
+/** Units for choosing among plans of equal cost: so many for each piece, up to a limit. */
+const POLISH = { each: 120, most: 4_000 } as const;
 const NOTHING: readonly [number, number] = [0, 0];
 
 /** The plan of least cost that the budget allows, with what is proved of it. */
@@ -115,7 +115,8 @@ class Search {
 	private polished(opened: readonly Opened[]): readonly Opened[] {
 		const sheets = opened.map((sheet) => ({ ...sheet, used: areaIn(sheet.box) }));
 		const start = { sheets, outside: [], cost: this.best?.cost ?? 0 };
-		const end = this.meter.spent + POLISH;
+		const allowance = Math.min(POLISH.most, POLISH.each * (this.model.total - 1));
+		const end = this.meter.spent + (this.budget.polish ?? allowance);
 		return polish(
 			this.inserter,
 			start,
