@@ -25,7 +25,7 @@ const TURN = 20_000;
 /** Combinations that are listed before the patterns they may need. */
 const BATCH = 200;
 /** Units for choosing among plans of equal cost: so many for each piece, up to a limit. */
-const POLISH = { each: 120, most: 4_000 } as const;
+const POLISH = { each: 1_200, most: 40_000 } as const;
 const NOTHING: readonly [number, number] = [0, 0];
 
 /** The plan of least cost that the budget allows, with what is proved of it. */
@@ -54,6 +54,7 @@ class Search {
 	private best: { readonly opened: readonly Opened[]; readonly cost: number } | null = null;
 	private bound = 0;
 	private impossible = false;
+	private targets: readonly Combination[] = [];
 
 	constructor(
 		private readonly problem: CutProblem,
@@ -75,24 +76,25 @@ class Search {
 		if (this.done) return;
 		const combinations = new Combinations(this.model, inequalitiesOf(this.model, false), this.meter);
 		this.raise(combinations.bound);
-		this.alternate(this.climb(start), Patterns.few(this.model) ? this.prove(combinations) : null);
+		this.alternate(this.climb(start), this.prove(combinations));
 	}
 
 	/** Search from above and proof from below take turns, since nobody can say which will finish first. */
-	private alternate(above: Iterator<unknown>, below: Iterator<unknown> | null): void {
+	private alternate(above: Iterator<unknown>, below: Iterator<unknown>): void {
+		let proving = true;
 		for (let turn = 0; !this.done && this.meter.open; turn++) {
-			const side = below && turn % 2 === 1 ? below : above;
+			const side = proving && turn % 2 === 1 ? below : above;
 			const go = this.meter.allow(TURN);
 			while (!this.done && go()) {
 				if (!side.next().done) continue;
-				if (side === below) below = null;
+				if (side === below) proving = false;
 				break;
 			}
 		}
 	}
 
 	private *climb(start: State): Generator<undefined> {
-		for (const state of improve(this.inserter, start)) {
+		for (const state of improve(this.inserter, start, () => this.targets)) {
 			if (state) this.take(state);
 			yield;
 		}
@@ -136,6 +138,8 @@ class Search {
 		while (!this.done) {
 			const batch = yield* this.nextBatch(combinations);
 			if (batch.length === 0) return this.raise(combinations.bound);
+			this.targets = batch;
+			if (!Patterns.few(this.model)) return;
 			const loss = this.best ? Math.max(...batch.map((combination) => this.spare(combination))) : Infinity;
 			if (!patterns || loss > known) patterns = yield* Patterns.of(this.model, (known = loss), this.meter);
 			for (const combination of batch) {

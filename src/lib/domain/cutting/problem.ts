@@ -38,7 +38,7 @@ export interface CutBudget {
 	readonly work: number;
 	readonly shouldStop?: () => boolean;
 	readonly seed?: number;
-	/** Units spent on choosing among plans of equal cost; 120 for each piece, at most 4,000, where it is left out. */
+	/** Units spent on choosing among plans of equal cost; 1,200 for each piece, at most 40,000, where left out. */
 	readonly polish?: number;
 	readonly onProgress?: (progress: {
 		best: readonly [number, number] | null;

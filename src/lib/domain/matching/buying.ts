@@ -7,9 +7,10 @@ import type { Bench, CostOf } from './layout';
 import { lieUnder, roomFor } from './lies';
 import type { Part, Terms } from './parts';
 import { seatOn } from './papers';
-import { printsOf, type Print } from './prints';
+import type { Print } from './prints';
 import type { Use } from './serving';
 import type { Sheet } from './shelf';
+import { Uses } from './uses';
 import type { MatchOptions } from './verdict';
 
 export interface MissingSheets {
@@ -35,7 +36,7 @@ export function sheetsToBuy(
 		if (seat.part.slot !== lacking.slot || seat.part.project !== lacking.project) return seatOn(seat, terms);
 		const more = moreFor(seat, bench.options);
 		for (const { use, custom } of more) bought.set(use.sheet, custom);
-		return seatOn({ ...seat, uses: [...seat.uses, ...more.map(({ use }) => use)] }, terms);
+		return seatOn({ ...seat, uses: new Uses([...seat.uses.list, ...more.map(({ use }) => use)]) }, terms);
 	});
 	const costOf: CostOf = (sheet) => (bought.has(sheet) ? [1, 0] : [0, 1]);
 	const choice = chooseDesigns(at, costOf, bench);
@@ -59,7 +60,7 @@ interface More {
 /** What could be bought for a seat: for every design that it may show, or for one nobody owns yet. */
 function moreFor({ part, uses }: Seat, options: MatchOptions): More[] {
 	const total = part.pieces.reduce((sum, { qty }) => sum + qty, 0);
-	const designs = part.single ? designsOf(uses) : [{ prints: null, uses }];
+	const designs = part.single ? designsOf(uses.list) : [{ prints: null, uses: uses.list }];
 	const kinds = designs.length > 0 ? designs : [{ prints: null, uses: [] }];
 	return kinds.flatMap(({ prints, uses: own }) => {
 		const asked = own.filter(({ ways }) => ways.some(({ material }) => material < 0));
@@ -82,7 +83,7 @@ function moreFor({ part, uses }: Seat, options: MatchOptions): More[] {
 
 const SQUARE_12 = { w: 12 * INCH, h: 12 * INCH };
 const A4 = { w: 210 * MILLIMETRE, h: 297 * MILLIMETRE };
-const UNKNOWN: Print = { face: 'A', design: '\n', name: '', bound: false };
+const UNKNOWN: Print = { face: 'A', design: '\n', name: '', bound: false, classes: [-1, -1, -1] };
 
 interface Size {
 	readonly w: Length;
@@ -139,7 +140,7 @@ function distinct(uses: readonly Use[]): Use[] {
 function copyOf({ sheet, prints }: Use, count: number): Use {
 	const supply: SheetSupply = { ...sheet.supply, key: '', count: 'counted', arrives: null };
 	return {
-		sheet: { ...sheet, supply, count, order: Number.MAX_SAFE_INTEGER, first: 1 },
+		sheet: { ...sheet, supply, count, order: Number.MAX_SAFE_INTEGER, first: 1, sort: -2 - sheet.sort },
 		prints,
 		ways: BOUGHT
 	};
@@ -168,7 +169,6 @@ function blank(part: Part, { w, h }: Size, prints: readonly Print[], count: numb
 		offcut: false,
 		strip: null
 	};
-	const shown = prints.length > 0 ? prints : printsOf(supply);
 	return {
 		sheet: {
 			supply,
@@ -180,9 +180,10 @@ function blank(part: Part, { w, h }: Size, prints: readonly Print[], count: numb
 			count,
 			first: 1,
 			remnant: false,
-			prints: shown
+			prints,
+			sort: -1
 		},
-		prints: shown,
+		prints,
 		ways: BOUGHT
 	};
 }

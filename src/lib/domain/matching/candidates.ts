@@ -1,134 +1,134 @@
 import { colourDistance } from './colour-wish';
-import type { Seat } from './components';
-import type { CostOf, Cost, Offer } from './layout';
+import type { Cost, CostOf, Offer } from './layout';
 import { isBelow, leastCost } from './least-cost';
-import type { Print } from './prints';
-import { wayOn } from './serving';
+import type { Part } from './parts';
 import type { Sheet } from './shelf';
+import type { Offers } from './uses';
 
-/** A design that could serve a whole group of slots by itself. */
+/** Slots that show one design together. */
+export interface Group {
+	readonly key: string;
+	/** Numbers of its parts among those that are planned together. */
+	readonly seats: readonly number[];
+	readonly differs: ReadonlySet<string>;
+}
+
+/** A design that could serve a whole group by itself. */
 export interface Candidate {
 	readonly design: string;
-	/** By seat; empty for seats of other groups. */
+	/** By place in the group. */
 	readonly offers: readonly (readonly Offer[])[];
 	readonly sheets: ReadonlySet<Sheet>;
 	/** What the group alone would cost at least. */
 	readonly least: Cost;
-	/** Candidates of one class are alike in every way that counts, up to their names. */
-	readonly likeness: string;
+	/** The group's pieces would fill most of its paper: likelier than not too much for it. */
+	readonly tight: boolean;
 }
 
-/** What every seat may use on its own terms, in the stash's order. */
-export function offersOf(seats: readonly Seat[]): Offer[][] {
-	return seats.map(({ part, uses }) =>
-		uses.flatMap(({ sheet, prints, ways }) => {
-			const way = wayOn({ sheet, prints, ways }, part.terms);
-			return way ? [{ sheet, prints, way }] : [];
-		})
-	);
-}
+const ROOMY = 0.7;
 
-/** The designs that can serve the group, those of least bound first, then by colour wish and the stash's order. */
-export function candidatesFor(
-	group: readonly number[],
-	seats: readonly Seat[],
-	offers: readonly (readonly Offer[])[],
-	costOf: CostOf,
-	likenessOf: (design: string) => string
-): Candidate[] {
-	const byDesign = group.map((seat) => offersByDesign(offers[seat] ?? []));
-	const found: { candidate: Candidate; colour: number }[] = [];
-	const parts = group.flatMap((seat) => seats[seat]?.part ?? []);
-	for (const design of byDesign[0]?.keys() ?? []) {
-		const own = byDesign.map((designs) => designs.get(design) ?? []);
-		if (own.some((list) => list.length === 0)) continue;
-		const least = leastCost(parts, own, costOf);
-		if (!least) continue;
-		const sheets = new Set(own.flat().map(({ sheet }) => sheet));
-		const all = seats.map((_, seat) => own[group.indexOf(seat)] ?? []);
-		const candidate = { design, offers: all, sheets, least, likeness: likenessOf(design) };
-		found.push({
-			candidate,
-			colour: colourOf(
-				parts.map((part) => part.slot.colour),
-				sheets
-			)
-		});
+/** The designs open to one group. Those of a class are alike in every way that counts, up to their names. */
+export class Candidates {
+	/** By class, the designs in the stash's order, or in that of the colour wishes. */
+	private readonly classes: readonly (readonly string[])[];
+	private readonly parts: readonly Part[];
+	private readonly offers: readonly Offers[];
+	private readonly known = new Map<string, Candidate | null>();
+	private readonly area: number;
+	private ranked: readonly { readonly designs: readonly string[]; readonly first: Candidate }[] | null = null;
+
+	/**
+	 * `depth`: how many steps over rows' other faces a class looks. `chosen`: names that some slot asks for; such
+	 * a design is a class of its own.
+	 */
+	constructor(
+		group: Group,
+		parts: readonly Part[],
+		offers: readonly Offers[],
+		private readonly costOf: CostOf,
+		depth: number,
+		chosen: ReadonlySet<string>
+	) {
+		this.parts = group.seats.flatMap((seat) => parts[seat] ?? []);
+		this.offers = group.seats.flatMap((seat) => offers[seat] ?? []);
+		this.area = this.parts.reduce(
+			(sum, { pieces }) => sum + pieces.reduce((all, { w, h, qty }) => all + w * h * qty, 0),
+			0
+		);
+		const classes = this.offers[0]?.classes(depth) ?? [];
+		const named = chosen.size === 0 ? classes : classes.flatMap((designs) => this.apart(designs, chosen));
+		const wished = this.parts.some(({ slot }) => slot.colour !== null);
+		this.classes = wished
+			? named.map((designs) => [...designs].sort((a, b) => this.colourOf(a) - this.colourOf(b)))
+			: named;
 	}
-	return found
-		.sort((a, b) => compare(a.candidate.least, b.candidate.least) || a.colour - b.colour)
-		.map(({ candidate }) => candidate);
-}
 
-function compare(a: Cost, b: Cost): number {
-	return isBelow(a, b) ? -1 : isBelow(b, a) ? 1 : 0;
-}
-
-function colourOf(wishes: readonly (string | null)[], sheets: ReadonlySet<Sheet>): number {
-	return wishes.reduce(
-		(sum, wish) =>
-			sum + (wish === null ? 0 : Math.min(...[...sheets].map(({ supply }) => colourDistance(wish, supply)))),
-		0
-	);
-}
-
-function offersByDesign(offers: readonly Offer[]): Map<string, Offer[]> {
-	const designs = new Map<string, Offer[]>();
-	for (const offer of offers) {
-		for (const design of new Set(offer.prints.map((print) => print.design))) {
-			const prints = offer.prints.filter((print) => print.design === design);
-			const narrowed = prints.length === offer.prints.length ? offer : { ...offer, prints };
-			const known = designs.get(design);
-			if (known) known.push(narrowed);
-			else designs.set(design, [narrowed]);
-		}
+	private apart(designs: readonly string[], chosen: ReadonlySet<string>): string[][] {
+		const isChosen = (design: string) =>
+			chosen.has(this.offers[0]?.designs.get(design)?.[0]?.prints[0]?.name ?? '');
+		const others = designs.filter((design) => !isChosen(design));
+		return [...designs.filter(isChosen).map((design) => [design]), ...(others.length > 0 ? [others] : [])];
 	}
-	return designs;
-}
 
-/**
- * Names a design's class: what its rows offer to every seat, and `depth` steps further over the rows' other
- * faces, by which a chain of groups could come to share sheets.
- */
-export function likeness(
-	seats: readonly Seat[],
-	offers: readonly (readonly Offer[])[],
-	costOf: CostOf,
-	depth: number
-): (design: string) => string {
-	const total = seats.reduce((sum, { part }) => sum + part.pieces.reduce((all, { qty }) => all + qty, 0), 0);
-	const seatsOf = new Map<Sheet, { seat: number; prints: readonly Print[] }[]>();
-	const holders = new Map<string, Set<Sheet>>();
-	offers.forEach((list, seat) => {
-		for (const { sheet, prints } of list) {
-			const known = seatsOf.get(sheet);
-			if (known) known.push({ seat, prints });
-			else seatsOf.set(sheet, [{ seat, prints }]);
-			for (const { design } of sheet.prints) {
-				const sheets = holders.get(design);
-				if (sheets) sheets.add(sheet);
-				else holders.set(design, new Set([sheet]));
-			}
-		}
-	});
-	const sheetName = (sheet: Sheet, design: string): string => {
-		const faces = sheet.prints.map((print) => {
-			const open = (seatsOf.get(sheet) ?? [])
-				.filter(({ prints }) => prints.includes(print))
-				.map(({ seat }) => seat);
-			return `${print.design === design ? 'own' : 'other'}${print.bound ? '^' : ''}${open.join('.')}`;
-		});
-		return `${sheet.supply.kind} ${sheet.w} ${sheet.h} ${Math.min(total, sheet.count)} ${costOf(sheet).join('/')} ${faces.sort().join()}`;
-	};
-	const nameAt = (design: string, sheets: ReadonlySet<Sheet>, steps: number): string =>
-		[...sheets]
-			.map((sheet) => {
-				const name = sheetName(sheet, design);
-				if (steps === 0) return name;
-				const others = sheet.prints.filter((print) => print.design !== design);
-				return `${name}(${others.map((print) => nameAt(print.design, holders.get(print.design) ?? new Set(), steps - 1)).join()})`;
+	of(design: string): Candidate | null {
+		const known = this.known.get(design);
+		if (known !== undefined) return known;
+		const offers = this.offers.map(({ designs }) => designs.get(design) ?? []);
+		const sorts = offers.map((list) => list.map((offer) => [offer]));
+		const least = leastCost(this.parts, sorts, this.costOf);
+		const sheets = new Set(offers.flat().map(({ sheet }) => sheet));
+		const candidate = least && { design, offers, sheets, least, tight: this.area > ROOMY * paperOf(sheets) };
+		this.known.set(design, candidate);
+		return candidate;
+	}
+
+	/**
+	 * The first of each class of which `isOpen` holds: least bound first, the roomy before the tight, then by
+	 * colour wish, then by the stash's order.
+	 */
+	firsts(isOpen: (design: string) => boolean): Candidate[] {
+		this.ranked ??= this.classes
+			.flatMap((designs) => {
+				const first = this.of(designs[0] ?? '');
+				return first ? [{ designs, first, colour: this.colourOf(first.design), order: orderOf(first) }] : [];
 			})
-			.sort()
-			.join(';');
-	return (design) => nameAt(design, holders.get(design) ?? new Set(), depth);
+			.sort((a, b) => compare(a.first, b.first) || a.colour - b.colour || a.order - b.order);
+		return this.ranked.flatMap(({ designs, first }) => {
+			if (isOpen(first.design)) return [first];
+			const design = designs.find(isOpen);
+			return (design === undefined ? null : this.of(design)) ?? [];
+		});
+	}
+
+	private colourOf(design: string): number {
+		return this.parts.reduce((sum, { slot }, i) => {
+			const rows = slot.colour === null ? [] : (this.offers[i]?.designs.get(design) ?? []);
+			return (
+				sum +
+				(rows.length > 0
+					? Math.min(...rows.map(({ sheet }) => colourDistance(slot.colour, sheet.supply)))
+					: 0)
+			);
+		}, 0);
+	}
+}
+
+function compare(a: Candidate, b: Candidate): number {
+	return isBelow(a.least, b.least) ? -1 : isBelow(b.least, a.least) ? 1 : Number(a.tight) - Number(b.tight);
+}
+
+function paperOf(sheets: ReadonlySet<Sheet>): number {
+	return [...sheets].reduce((sum, { w, h, count }) => sum + w * h * count, 0);
+}
+
+function orderOf({ sheets }: Candidate): number {
+	return Math.min(...[...sheets].map(({ order }) => order));
+}
+
+export function touches(a: Candidate, b: Candidate): boolean {
+	if (a.design === b.design) return true;
+	for (const sheet of b.sheets) {
+		if (a.sheets.has(sheet)) return true;
+	}
+	return false;
 }

@@ -1,22 +1,27 @@
 import type { Seat } from './components';
-import type { CostOf } from './layout';
+import type { Cost, CostOf } from './layout';
 import type { Sheet } from './shelf';
+
+const LEFT: Cost = [0, 1];
+const ONE: Cost = [1, 0];
 
 /** Whole sheets first, by price where every candidate has one in one currency; then offcuts and remnants. */
 export function costsOf(seats: readonly Seat[]): CostOf {
-	const whole = seats
-		.flatMap(({ uses }) => uses.map(({ sheet }) => sheet))
-		.filter((sheet) => !isLeftover(sheet));
-	const currency = whole[0]?.supply.price?.currency;
-	const priced = whole.every(
-		({ supply: { price } }) => price && price.amount > 0 && price.currency === currency
-	);
-	return (sheet) => {
-		if (isLeftover(sheet)) return [0, 1];
-		return [priced ? (sheet.supply.price?.amount ?? 1) : 1, 0];
-	};
+	if (!arePriced(seats)) return (sheet) => (isLeft(sheet) ? LEFT : ONE);
+	return (sheet) => (isLeft(sheet) ? LEFT : [sheet.supply.price?.amount ?? 1, 0]);
 }
 
-function isLeftover(sheet: Sheet): boolean {
-	return sheet.supply.offcut || sheet.remnant;
+/** Cost of the dearest sheet that could be opened: turns a bound on costs into one on sheets. */
+export function dearestOf(seats: readonly Seat[]): number {
+	return arePriced(seats) ? Math.max(...seats.map(({ uses }) => uses.dearest)) : 1;
+}
+
+function arePriced(seats: readonly Seat[]): boolean {
+	const currencies = new Set(seats.flatMap(({ uses }) => [...uses.currencies]));
+	return currencies.size === 1 && !currencies.has(null);
+}
+
+/** An offcut of the stash's, or what is left of a sheet that another project opened. */
+export function isLeft({ supply, remnant }: Sheet): boolean {
+	return supply.offcut || remnant;
 }

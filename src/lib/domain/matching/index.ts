@@ -1,7 +1,7 @@
 import type { MatchBudget, MatchRequest } from './request';
 import { answerOf } from './answer';
 import { matchBill } from './project';
-import { purseOf } from './purse';
+import { Purse } from './purse';
 import { shelve } from './shelf';
 import type { MatchResponse } from './verdict';
 
@@ -13,7 +13,7 @@ export function matchProjects(request: MatchRequest, budget: MatchBudget): Match
 	const { bills, supplies, copies, on, options } = request;
 	const shelf = shelve(supplies, options.kerf);
 	const results = bills.map((bill) => {
-		const bench = { options, purse: purseOf(budget, bills.length) };
+		const bench = { options, purse: Purse.of(budget, bills.length), goal: 'least' as const };
 		return answerOf(matchBill(bill, copies[bill.key] ?? 1, shelf, on, bench), shelf, options);
 	});
 	return { unit: '1/320 mm', results };

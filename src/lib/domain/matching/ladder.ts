@@ -31,6 +31,5 @@ function levels(terms: Terms, highest: number): Terms[] {
 }
 
 function arrivals(seats: readonly Seat[], on: string): string[] {
-	const dates = seats.flatMap(({ uses }) => uses.map(({ sheet }) => sheet.supply.arrives));
-	return [...new Set(dates.filter((date) => date !== null && date > on))].sort() as string[];
+	return [...new Set(seats.flatMap(({ uses }) => uses.arrivals))].filter((date) => date > on).sort();
 }

@@ -15,7 +15,7 @@ export function countMost(seats: readonly Seat[], terms: Terms, costOf: CostOf, 
 	const counts = seats.map(({ part }) => part.pieces.map(() => 0));
 	const works = (): boolean => {
 		const at = withCounts(seats, counts).map((seat) => seatOn(seat, terms));
-		return at.length === 0 || chooseDesigns(at, costOf, bench).status === 'planned';
+		return at.length === 0 || chooseDesigns(at, costOf, { ...bench, goal: 'any' }).status === 'planned';
 	};
 	seats.forEach(({ part }, s) =>
 		part.pieces.forEach(({ qty }, p) => {

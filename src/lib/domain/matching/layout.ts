@@ -1,13 +1,14 @@
-import { planCuts } from '../cutting';
+import { planAny, planCuts } from '../cutting';
 import type { Cut, CutAnswer, CutProblem, Rect } from '../cutting/problem';
-import type { MatchOptions } from './verdict';
+import { isBelow, leastCost, type Sorts } from './least-cost';
 import type { Cuttable, Part } from './parts';
 import type { Print } from './prints';
-import { isSpent, shareOf, type Purse } from './purse';
-import { namedSheets, questionOf } from './question';
+import type { Purse } from './purse';
+import { likelyKinds, namedSheets, problemOf, questionOf, type Kind, type Question } from './question';
 import type { Way } from './serving';
 import type { Sheet } from './shelf';
 import { isSound } from './soundness';
+import type { MatchOptions } from './verdict';
 
 /** A row offered to a part, with the faces that it may show and what makes the row serve. */
 export interface Offer {
@@ -53,32 +54,48 @@ export type CostOf = (sheet: Sheet) => Cost;
 export interface Bench {
 	readonly options: MatchOptions;
 	readonly purse: Purse;
+	/** `any`: only whether there is a plan; `least`: the cheapest; `shown`: the cheapest, with the fewest cuts too. */
+	readonly goal: 'any' | 'least' | 'shown';
 }
 
-/** Plans every piece of `parts`, part i from `offers[i]`; the checker has passed what it returns. */
+/** Plans every piece of `parts`, part p from `sorts[p]`; the checker has passed what it returns. */
 export function layOut(
 	parts: readonly Part[],
-	offers: readonly (readonly Offer[])[],
+	sorts: readonly Sorts[],
 	costOf: CostOf,
 	bench: Bench
 ): Outcome {
-	const question = questionOf(parts, offers, costOf, bench.options);
-	if (!question) return { status: 'impossible' };
-	const answer = ask(question.problem, bench);
+	const least = leastCost(parts, sorts, costOf);
+	if (!least) return { status: 'impossible' };
+	const question = questionOf(parts, sorts, costOf);
+	const likely = likelyKinds(question);
+	const outcome = answered(question, likely, costOf, bench);
+	if (likely.length === question.kinds.length) return outcome;
+	if (outcome.status === 'impossible') return answered(question, question.kinds, costOf, bench);
+	if (outcome.status !== 'planned') return outcome;
+	const { layout } = outcome;
+	return { status: 'planned', layout: { ...layout, bound: least, minimum: !isBelow(least, layout.cost) } };
+}
+
+function answered(question: Question, kinds: readonly Kind[], costOf: CostOf, bench: Bench): Outcome {
+	const answer = ask(problemOf(question, kinds, bench.options), bench);
 	if (answer.status !== 'planned') return { status: answer.status };
-	const sheets = namedSheets(question, answer.plan);
+	const sheets = namedSheets(question, kinds, answer.plan);
 	const layout = { sheets, cost: answer.plan.cost, bound: answer.bound, minimum: answer.minimum };
-	return isSound(parts, offers, layout, costOf, bench.options)
+	return isSound(question, layout, costOf, bench.options)
 		? { status: 'planned', layout }
 		: { status: 'unknown' };
 }
 
-function ask(problem: CutProblem, { purse }: Bench): CutAnswer {
-	if (isSpent(purse)) return { status: 'unknown', bound: [0, 0] };
-	const share = shareOf(purse);
-	const answer = planCuts(problem, share);
-	const ended = answer.status === 'impossible' || (answer.status === 'planned' && answer.minimum);
-	const size = problem.pieces.length * problem.sheets.length;
-	purse.left -= ended ? Math.min(share.work, size) : share.work;
+/** What the planner does before it counts, for each piece kind on each sheet kind. */
+const SETTING_UP = 10;
+
+function ask(problem: CutProblem, { purse, goal }: Bench): CutAnswer {
+	if (purse.isSpent) return { status: 'unknown', bound: [0, 0] };
+	const share = purse.share(goal === 'shown');
+	const answer = (goal === 'any' ? planAny : planCuts)(problem, share);
+	const ended =
+		answer.status === 'impossible' || (answer.status === 'planned' && (answer.minimum || goal === 'any'));
+	purse.spend((ended ? 0 : share.work) + SETTING_UP * problem.pieces.length * (1 + problem.sheets.length));
 	return answer;
 }

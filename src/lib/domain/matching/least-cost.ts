@@ -2,46 +2,98 @@ import { LIES } from '../cutting/problem';
 import type { Cost, CostOf, Offer } from './layout';
 import { lieOn } from './lies';
 import type { Part } from './parts';
+import type { Sheet } from './shelf';
+
+/** Offers of one sort: alike for every piece, so that the first speaks for all. */
+export type Sorts = readonly (readonly Offer[])[];
 
 /**
  * A cost that no layout of these pieces on these rows can beat, by area and by what fits no offcut; null where a
  * piece fits nowhere or there is less paper than pieces, so that there is no layout at all.
  */
-export function leastCost(
-	parts: readonly Part[],
-	offers: readonly (readonly Offer[])[],
-	costOf: CostOf
-): Cost | null {
-	let area = 0;
-	let needsWhole = false;
+export function leastCost(parts: readonly Part[], sorts: readonly Sorts[], costOf: CostOf): Cost | null {
+	const tally = new Tally(parts.length > 1);
 	for (const [p, part] of parts.entries()) {
-		for (const cut of part.pieces) {
-			if (cut.qty === 0) continue;
-			area += cut.w * cut.h * cut.qty;
-			const fitting = (offers[p] ?? []).filter(
-				({ sheet, prints }) => lieOn(cut, sheet, prints, part.terms) !== LIES.never
-			);
-			if (fitting.length === 0) return null;
-			needsWhole ||= fitting.every(({ sheet }) => costOf(sheet)[0] > 0);
+		if (!tally.add(part, sorts[p] ?? [], costOf)) return null;
+	}
+	return tally.least();
+}
+
+class Tally {
+	private area = 0;
+	private left = 0;
+	private whole = 0;
+	private perArea = Infinity;
+	private cheapest = Infinity;
+	private needsWhole = false;
+	private readonly lefts: { size: number; count: number }[] = [];
+	private readonly seen: Set<Sheet> | null;
+
+	/** Rows need telling apart only where several parts may share them. */
+	constructor(shared: boolean) {
+		this.seen = shared ? new Set() : null;
+	}
+
+	/** False where one of the part's pieces fits nowhere. */
+	add({ pieces, terms }: Part, sorts: Sorts, costOf: CostOf): boolean {
+		let [fits, fitsLeft] = [0, 0];
+		const served = new Uint8Array(pieces.length);
+		for (const offers of sorts) {
+			const first = offers[0];
+			if (!first) continue;
+			const cost = costOf(first.sheet)[0];
+			const mark = cost === 0 ? 3 : 1;
+			let serves = false;
+			for (let c = 0; c < pieces.length; c++) {
+				const cut = pieces[c];
+				if (!cut || lieOn(cut, first.sheet, first.prints, terms) === LIES.never) continue;
+				serves = true;
+				const known = served[c] ?? 0;
+				if (known === 0) fits += 1;
+				if ((known & 2) === 0 && mark === 3) fitsLeft += 1;
+				served[c] = known | mark;
+			}
+			if (serves) this.pile(offers, cost);
+		}
+		for (const cut of pieces) this.area += cut.w * cut.h * cut.qty;
+		if (fitsLeft < pieces.length) this.needsWhole = true;
+		return fits === pieces.length;
+	}
+
+	private pile(offers: readonly Offer[], cost: number): void {
+		for (const { sheet } of offers) {
+			if (this.seen?.has(sheet)) continue;
+			this.seen?.add(sheet);
+			const size = sheet.w * sheet.h;
+			if (cost === 0) {
+				this.left += size * sheet.count;
+				this.lefts.push({ size, count: sheet.count });
+			} else {
+				this.whole += size * sheet.count;
+				this.perArea = Math.min(this.perArea, cost / size);
+				this.cheapest = Math.min(this.cheapest, cost);
+			}
 		}
 	}
-	if (area === 0) return [0, 0];
-	const sheets = new Set(offers.flat().map(({ sheet }) => sheet));
-	let [free, whole, perArea, cheapest] = [0, 0, Infinity, Infinity];
-	for (const sheet of sheets) {
-		const [cost] = costOf(sheet);
-		const size = sheet.w * sheet.h;
-		if (cost === 0) free += size * sheet.count;
-		else {
-			whole += size * sheet.count;
-			perArea = Math.min(perArea, cost / size);
-			cheapest = Math.min(cheapest, cost);
-		}
+
+	least(): Cost | null {
+		const { area, left } = this;
+		if (area > left + this.whole) return null;
+		const byArea = area > left ? Math.ceil((area - left) * this.perArea - 1e-9) : 0;
+		const first = Math.max(byArea, this.needsWhole ? this.cheapest : 0);
+		return first > 0 ? [first, 0] : [0, this.fewestLefts()];
 	}
-	if (area > free + whole) return null;
-	const byArea = area > free ? Math.ceil((area - free) * perArea - 1e-9) : 0;
-	const first = Math.max(byArea, needsWhole ? cheapest : 0);
-	return first > 0 ? [first, 0] : [0, 1];
+
+	private fewestLefts(): number {
+		let [open, number] = [this.area, 0];
+		for (const { size, count } of this.lefts.sort((a, b) => b.size - a.size)) {
+			if (open <= 0) break;
+			const taken = Math.min(count, Math.ceil(open / size));
+			number += taken;
+			open -= taken * size;
+		}
+		return number;
+	}
 }
 
 export function isBelow(a: Cost, b: Cost): boolean {

@@ -9,7 +9,7 @@ const SMALL_MISS = { in: INCH / 16, mm: 1.5 * MILLIMETRE, cm: 1.5 * MILLIMETRE }
 /** For every row that could serve the seat but for a sliver: the smallest miss, where the other side fits. */
 export function nearMisses({ part, uses }: Seat, options: MatchOptions): NearMiss[] {
 	const most = SMALL_MISS[options.units];
-	return uses.flatMap(({ sheet, prints }) => {
+	return uses.list.flatMap(({ sheet, prints }) => {
 		const misses = part.pieces.flatMap(({ piece }) => {
 			const cut = { piece, qty: 1, w: piece.w, h: piece.h };
 			const lies = prints.reduce((all, { bound }) => all | lieUnder(cut, bound), 0);

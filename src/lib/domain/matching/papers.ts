@@ -4,7 +4,6 @@ import { milderThan, rungsOf } from './ladder';
 import type { Bench, CostOf, Layout } from './layout';
 import { onTerms, type Terms } from './parts';
 import { restoreSizes } from './restoring';
-import { wayOn } from './serving';
 
 /** How a component's paper was found: the seats on the terms that each needed. */
 export interface Papers {
@@ -74,11 +73,8 @@ class Climber {
 
 /** What terms come to for a seat: terms that allow the same rows and sizes need no second search. */
 function effectOf({ part, uses }: Seat): string {
-	const allowed = uses.flatMap((use, i) => {
-		const way = wayOn(use, part.terms);
-		return way ? [`${i}${way.material < 0 ? '' : `s${way.material}`}${way.unsaid ?? ''}`] : [];
-	});
-	return `${part.pieces.map(({ w, h, qty }) => `${w} ${h} ${qty}`).join()}:${allowed.join(' ')}`;
+	const sizes = part.pieces.map(({ w, h, qty }) => `${w} ${h} ${qty}`).join();
+	return `${sizes}:${uses.on(part.terms).number}`;
 }
 
 function isSame(a: Terms, b: Terms): boolean {

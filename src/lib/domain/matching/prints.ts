@@ -7,20 +7,20 @@ export interface Print {
 	readonly design: string;
 	readonly name: string;
 	readonly bound: boolean;
+	/** Classes of designs that are alike up to their names; see `classifyDesigns`. */
+	readonly classes: readonly number[];
 }
 
 /** The faces that can be used. A row without faces shows its own name on both; a B-side nobody described is none. */
-export function printsOf(supply: SheetSupply): Print[] {
-	if (supply.faces.length === 0) {
-		const design = designKey(supply.collection, supply.name);
-		return (['A', 'B'] as const).map((face) => ({ face, design, name: supply.name, bound: false }));
-	}
-	return supply.faces.slice(0, 2).map((face, side) => ({
-		face: side === 0 ? 'A' : 'B',
-		design: designKey(supply.collection, face.design),
-		name: face.design,
-		bound: face.direction !== 'none'
-	}));
+export function printsOf(supply: SheetSupply, classesOf: (design: string) => readonly number[]): Print[] {
+	const print = (face: Print['face'], name: string, bound: boolean): Print => {
+		const design = designKey(supply.collection, name);
+		return { face, design, name, bound, classes: classesOf(design) };
+	};
+	if (supply.faces.length === 0) return [print('A', supply.name, false), print('B', supply.name, false)];
+	return supply.faces
+		.slice(0, 2)
+		.map(({ design, direction }, side) => print(side === 0 ? 'A' : 'B', design, direction !== 'none'));
 }
 
 function designKey(collection: string | null, name: string): string {

@@ -1,6 +1,6 @@
 import type { Bill } from '../bill/bill';
 import { componentsOf, type Seat } from './components';
-import { costsOf } from './costs';
+import { costsOf, dearestOf } from './costs';
 import { drawConsumables } from './consumables';
 import type { Bench, CostOf, Layout } from './layout';
 import { isCutAlready } from './lies';
@@ -175,12 +175,11 @@ function findWith(seats: readonly Seat[], first: Terms, costOf: CostOf, bench: B
 	const near = seats.flatMap((seat, s) =>
 		lines[s]?.verdict === 'now' ? [] : nearMisses(seat, bench.options)
 	);
-	const dearest = Math.max(1, ...seats.flatMap(({ uses }) => uses.map(({ sheet }) => costOf(sheet)[0])));
 	return {
 		lines,
 		short: lack?.short ?? [],
 		near,
-		layout: layout && { layout, dearest },
+		layout: layout && { layout, dearest: dearestOf(seats) },
 		cutsBoard: layout !== null && cutsChipboard(layout)
 	};
 }

@@ -1,24 +1,45 @@
 import type { CutBudget } from '../cutting/problem';
 import type { MatchBudget } from './request';
 
-/**
- * The work that one project may spend. A planner's call gets a share of what is left; a call that ends with a
- * proof is charged for the size of its question, one that doesn't for its whole share.
- */
-export interface Purse {
-	left: number;
-	readonly shouldStop: (() => boolean) | undefined;
-}
+const MOST_POLISH = 20_000;
 
-export function purseOf(budget: MatchBudget, projects: number): Purse {
-	return { left: Math.floor(budget.work / Math.max(1, projects)), shouldStop: budget.shouldStop };
-}
+/** Work that may still be spent. What is spent from a purse within another is spent from both. */
+export class Purse {
+	private spent = 0;
 
-export function isSpent(purse: Purse): boolean {
-	return purse.left <= 0 || purse.shouldStop?.() === true;
-}
+	constructor(
+		private readonly work: number,
+		private readonly shouldStop: (() => boolean) | undefined,
+		private readonly outer: Purse | null = null
+	) {}
 
-export function shareOf(purse: Purse): CutBudget {
-	const work = Math.ceil(purse.left / 4);
-	return purse.shouldStop ? { work, shouldStop: purse.shouldStop } : { work };
+	/** An even share of the budget for one of so many projects. */
+	static of(budget: MatchBudget, projects: number): Purse {
+		return new Purse(Math.floor(budget.work / Math.max(1, projects)), budget.shouldStop);
+	}
+
+	/** A purse within this one, with that fraction of what is left. */
+	within(fraction: number): Purse {
+		return new Purse(Math.ceil(this.left * fraction), this.shouldStop, this);
+	}
+
+	get left(): number {
+		return Math.max(0, this.work - this.spent);
+	}
+
+	get isSpent(): boolean {
+		return this.left === 0 || this.shouldStop?.() === true;
+	}
+
+	spend(work: number): void {
+		this.spent += work;
+		this.outer?.spend(work);
+	}
+
+	/** What one call of the planner may spend. A plan that will be shown is polished, one of many tried is not. */
+	share(shown: boolean): CutBudget {
+		const work = Math.ceil(this.left / 4);
+		const polish = shown ? Math.min(MOST_POLISH, Math.ceil(this.work / 50)) : 0;
+		return { work, polish, ...(this.shouldStop ? { shouldStop: this.shouldStop } : {}) };
+	}
 }

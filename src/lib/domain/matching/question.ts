@@ -6,110 +6,167 @@ import {
 	type Lie,
 	type SheetKind
 } from '../cutting/problem';
-import type { MatchOptions } from './verdict';
+import { colourDistance } from './colour-wish';
 import type { CostOf, LaidSheet, Offer } from './layout';
+import type { Sorts } from './least-cost';
 import { lieOn, lieUnder } from './lies';
 import type { Cuttable, Part } from './parts';
 import type { Sheet } from './shelf';
+import type { MatchOptions } from './verdict';
 
-interface Member {
+/** A row with what it offers to each part; null where it isn't offered. */
+export interface Row {
 	readonly sheet: Sheet;
-	/** By part, null where the row isn't offered to it. */
 	readonly offers: readonly (Offer | null)[];
 }
 
-export interface Question {
-	readonly problem: CutProblem;
-	/** For each piece of the problem, what it is. */
-	readonly cuts: readonly { readonly part: number; readonly cut: Cuttable }[];
-	/** For each sheet kind of the problem, the rows that are alike, in the order in which they are opened. */
-	readonly rows: readonly (readonly Member[])[];
-	readonly parts: readonly Part[];
+/** Rows that are one sheet kind to the planner, in the order in which they are opened. */
+export interface Kind extends SheetKind {
+	readonly lies: readonly Lie[];
+	readonly rows: readonly Row[];
 }
 
-/** Null where some piece has no sheet to lie on, or there is less paper than pieces: no search is needed. */
-export function questionOf(
-	parts: readonly Part[],
-	offers: readonly (readonly Offer[])[],
-	costOf: CostOf,
-	options: MatchOptions
-): Question | null {
+export interface Question {
+	readonly parts: readonly Part[];
+	/** For each piece of the problem, what it is. */
+	readonly cuts: readonly { readonly part: number; readonly cut: Cuttable }[];
+	readonly kinds: readonly Kind[];
+}
+
+export function questionOf(parts: readonly Part[], sorts: readonly Sorts[], costOf: CostOf): Question {
 	const cuts = parts.flatMap((part, p) => part.pieces.map((cut) => ({ part: p, cut })));
 	const total = cuts.reduce((sum, { cut }) => sum + cut.qty, 0);
-	const kinds = new Map<string, { sheet: SheetKind; lies: Lie[]; rows: Member[] }>();
-	for (const member of membersOf(parts, offers)) {
-		const { sheet } = member;
+	const kinds = new Map<
+		string,
+		{ count: number; cost: readonly [number, number]; lies: Lie[]; rows: Row[] }
+	>();
+	for (const rows of alikeRows(parts.length, sorts)) {
+		const [first] = rows;
+		if (!first) continue;
+		const { sheet, offers } = first;
 		const lies = cuts.map(({ part, cut }) => {
-			const offer = member.offers[part];
-			const terms = parts[part]?.terms;
+			const [offer, terms] = [offers[part], parts[part]?.terms];
 			return offer && terms ? lieOn(cut, sheet, offer.prints, terms) : LIES.never;
 		});
 		if (lies.every((lie) => lie === LIES.never)) continue;
 		const cost = costOf(sheet);
-		const key = `${sheet.w} ${sheet.h} ${cost.join(' ')} ${lies.join('')}`;
-		const known = kinds.get(key);
-		const count = Math.min(total, (known?.sheet.count ?? 0) + sheet.count);
-		kinds.set(key, {
-			sheet: { w: sheet.w, h: sheet.h, count, cost },
-			lies,
-			rows: known ? [...known.rows, member] : [member]
-		});
+		const key = `${sheet.w} ${sheet.h} ${cost[0]} ${cost[1]} ${lies.join('')}`;
+		const known = kinds.get(key) ?? { count: 0, cost, lies, rows: [] };
+		known.count = Math.min(total, known.count + rows.reduce((sum, row) => sum + row.sheet.count, 0));
+		known.rows.push(...rows);
+		kinds.set(key, known);
 	}
-	const alike = [...kinds.values()];
-	const pieces = cuts.map(({ cut }, c) => ({
-		w: cut.w,
-		h: cut.h,
-		qty: cut.qty,
-		lies: alike.map((kind) => kind.lies[c] ?? LIES.never)
-	}));
-	if (pieces.some((piece) => piece.qty > 0 && piece.lies.every((lie) => lie === LIES.never))) return null;
-	const wanted = pieces.reduce((sum, { w, h, qty }) => sum + w * h * qty, 0);
-	if (wanted > alike.reduce((sum, { sheet }) => sum + sheet.w * sheet.h * sheet.count, 0)) return null;
-	const problem = {
-		sheets: alike.map((kind) => kind.sheet),
-		pieces,
+	const rank = rankOf(parts);
+	return {
+		parts,
+		cuts,
+		kinds: [...kinds.values()].map((kind) => ({
+			...kind,
+			w: kind.rows[0]?.sheet.w ?? 0,
+			h: kind.rows[0]?.sheet.h ?? 0,
+			rows: kind.rows.sort((a, b) => rank(a) - rank(b) || a.sheet.order - b.sheet.order)
+		}))
+	};
+}
+
+export function problemOf({ cuts }: Question, kinds: readonly Kind[], options: MatchOptions): CutProblem {
+	return {
+		sheets: kinds.map(({ w, h, count, cost }) => ({ w, h, count, cost })),
+		pieces: cuts.map(({ cut }, c) => ({
+			w: cut.w,
+			h: cut.h,
+			qty: cut.qty,
+			lies: kinds.map((kind) => kind.lies[c] ?? LIES.never)
+		})),
 		kerf: options.kerf,
 		interlocked: options.knife
 	};
-	return { problem, cuts, rows: alike.map((kind) => kind.rows), parts };
 }
 
-function membersOf(parts: readonly Part[], offers: readonly (readonly Offer[])[]): Member[] {
-	const members = new Map<Sheet, (Offer | null)[]>();
-	offers.forEach((list, p) => {
-		for (const offer of list) {
-			const known = members.get(offer.sheet) ?? parts.map(() => null);
-			known[p] = offer;
-			members.set(offer.sheet, known);
+/**
+ * The kinds that a first search needs to look at: of each cost the largest, until there is paper to spare. The
+ * fewest sheets are nearly always the largest ones; where they are not, the answer is only not proved by this.
+ */
+export function likelyKinds({ kinds, cuts }: Question): readonly Kind[] {
+	if (kinds.length <= FEW) return kinds;
+	const wanted = cuts.reduce((sum, { cut }) => sum + cut.w * cut.h * cut.qty, 0);
+	const chosen = [true, false].flatMap((whole) => {
+		const bySize = kinds.filter(({ cost }) => cost[0] > 0 === whole).sort((a, b) => b.w * b.h - a.w * a.h);
+		let [area, number] = [0, 0];
+		for (const kind of bySize) {
+			if (number >= FEW / 4 && area >= 2 * wanted) break;
+			area += kind.w * kind.h * kind.count;
+			number += 1;
 		}
+		return bySize.slice(0, number);
 	});
-	return [...members]
-		.map(([sheet, by]) => ({ sheet, offers: by }))
-		.sort((a, b) => Number(b.sheet.remnant) - Number(a.sheet.remnant) || a.sheet.order - b.sheet.order);
+	const everyPiece = cuts.flatMap(
+		(_, c) => chosen.some((kind) => kind.lies[c]) || kinds.find((kind) => kind.lies[c]) || []
+	);
+	return [...new Set([...chosen, ...everyPiece.filter((kind) => kind !== true)])];
+}
+
+const FEW = 16;
+
+/** Rows that are offered alike to every part. */
+function alikeRows(parts: number, sorts: readonly Sorts[]): Iterable<readonly Row[]> {
+	if (parts === 1)
+		return (sorts[0] ?? []).map((offers) => offers.map((offer) => ({ sheet: offer.sheet, offers: [offer] })));
+	const names = new Map<Sheet, { name: string; offers: (Offer | null)[] }>();
+	sorts.forEach((own, p) =>
+		own.forEach((offers, number) => {
+			for (const offer of offers) {
+				const known = names.get(offer.sheet) ?? {
+					name: '',
+					offers: Array.from({ length: parts }, () => null)
+				};
+				known.name += `${p}:${number} `;
+				known.offers[p] = offer;
+				names.set(offer.sheet, known);
+			}
+		})
+	);
+	const alike = new Map<string, Row[]>();
+	for (const [sheet, { name, offers }] of names) {
+		const known = alike.get(name);
+		if (known) known.push({ sheet, offers });
+		else alike.set(name, [{ sheet, offers }]);
+	}
+	return alike.values();
+}
+
+/** Remnants before untouched rows, then by the colours that slots of mixed designs wish for. */
+function rankOf(parts: readonly Part[]): (row: Row) => number {
+	const wishes = parts.flatMap((part, p) =>
+		!part.single && part.slot.colour !== null ? [{ p, colour: part.slot.colour }] : []
+	);
+	return ({ sheet, offers }) =>
+		(sheet.remnant ? -1000 : 0) +
+		wishes.reduce((sum, { p, colour }) => sum + (offers[p] ? colourDistance(colour, sheet.supply) : 0), 0);
 }
 
 /** Gives every opened sheet of the plan its row and number, and every piece the face that it shows. */
-export function namedSheets({ rows, cuts, parts }: Question, plan: CutPlan): LaidSheet[] {
-	const opened = rows.map(() => 0);
+export function namedSheets({ parts, cuts }: Question, kinds: readonly Kind[], plan: CutPlan): LaidSheet[] {
+	const opened = kinds.map(() => 0);
 	return plan.sheets.flatMap((planned) => {
 		const nth = opened[planned.sheet] ?? 0;
 		opened[planned.sheet] = nth + 1;
-		const row = nthOf(rows[planned.sheet] ?? [], nth);
-		return row ? [laidSheet(row.member, row.nth, planned, cuts, parts)] : [];
+		const row = nthOf(kinds[planned.sheet]?.rows ?? [], nth);
+		return row ? [laidSheet(row.row, row.nth, planned, cuts, parts)] : [];
 	});
 }
 
-function nthOf(rows: readonly Member[], nth: number): { member: Member; nth: number } | null {
+function nthOf(rows: readonly Row[], nth: number): { row: Row; nth: number } | null {
 	let before = 0;
-	for (const member of rows) {
-		if (nth < before + member.sheet.count) return { member, nth: member.sheet.first + nth - before };
-		before += member.sheet.count;
+	for (const row of rows) {
+		if (nth < before + row.sheet.count) return { row, nth: row.sheet.first + nth - before };
+		before += row.sheet.count;
 	}
 	return null;
 }
 
 function laidSheet(
-	{ sheet, offers }: Member,
+	{ sheet, offers }: Row,
 	nth: number,
 	planned: CutSheet,
 	cuts: Question['cuts'],
@@ -117,10 +174,9 @@ function laidSheet(
 ): LaidSheet {
 	const placements = planned.placements.flatMap(({ piece, x, y, w, h, turned }) => {
 		const known = cuts[piece];
-		const part = known && parts[known.part];
-		const offer = known && offers[known.part];
+		const [part, offer] = known ? [parts[known.part], offers[known.part]] : [];
 		const lie = turned ? LIES.turned : LIES.upright;
-		const print = offer?.prints.find((face) => (lieUnder(known!.cut, face.bound) & lie) !== 0);
+		const print = offer?.prints.find(({ bound }) => known && (lieUnder(known.cut, bound) & lie) !== 0);
 		return known && part && offer && print
 			? [{ part, cut: known.cut, x, y, w, h, turned, print, way: offer.way }]
 			: [];

@@ -1,6 +1,7 @@
 import type { Seat } from './components';
 import type { Choice } from './designs';
 import { layOut, type Bench, type CostOf, type Layout } from './layout';
+import { isBelow } from './least-cost';
 import type { Cuttable, Part } from './parts';
 
 type Planned = Extract<Choice, { status: 'planned' }>;
@@ -14,7 +15,7 @@ export function restoreSizes(
 ): { seats: readonly Seat[]; layout: Layout } {
 	let found = { parts: seats.map(({ part }) => part) as readonly Part[], layout: choice.layout };
 	const attempt = (parts: readonly Part[]): boolean => {
-		const outcome = layOut(parts, choice.offers, costOf, bench);
+		const outcome = layOut(parts, choice.sorts, costOf, { ...bench, goal: 'any' });
 		if (outcome.status === 'planned') found = { parts, layout: outcome.layout };
 		return outcome.status === 'planned';
 	};
@@ -34,8 +35,22 @@ export function restoreSizes(
 	}
 	return {
 		seats: seats.map((seat, i) => ({ ...seat, part: found.parts[i] ?? seat.part })),
-		layout: found.layout
+		layout: polished(found.parts, found.layout, choice, costOf, bench)
 	};
+}
+
+/** The same choice planned once more with the cuts in mind; what was proved of it stands. */
+function polished(
+	parts: readonly Part[],
+	layout: Layout,
+	choice: Planned,
+	costOf: CostOf,
+	bench: Bench
+): Layout {
+	const again = layOut(parts, choice.sorts, costOf, { ...bench, goal: 'shown' });
+	if (again.status !== 'planned' || isBelow(layout.cost, again.layout.cost)) return layout;
+	if (layout !== choice.layout || isBelow(again.layout.cost, layout.cost)) return again.layout;
+	return { ...again.layout, bound: layout.bound, minimum: layout.minimum };
 }
 
 interface Shortened {

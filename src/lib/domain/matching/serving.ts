@@ -1,6 +1,6 @@
 import type { Material, Slot } from '../bill/bill';
 import type { SheetSupply } from '../stash';
-import type { Part, Terms } from './parts';
+import type { Terms } from './parts';
 import type { Print } from './prints';
 import type { Sheet, Shelf } from './shelf';
 
@@ -35,16 +35,12 @@ export function usesFor(slot: Slot, shelf: Shelf): Use[] {
 }
 
 /** The first way that the terms allow, null where they allow none. */
-export function wayOn(use: Use, terms: Terms): Way | null {
+export function wayOn(use: Use, terms: Pick<Terms, 'on' | 'level' | 'unsure'>): Way | null {
 	const { supply } = use.sheet;
 	if (supply.arrives !== null && supply.arrives > terms.on) return null;
 	if (supply.count === 'unsure' && !terms.unsure) return null;
 	const swaps = Math.max(0, terms.level - 1);
 	return use.ways.find((way) => way.material < swaps && (way.unsaid === null || terms.unsure)) ?? null;
-}
-
-export function allowedUses(uses: readonly Use[], part: Part): Use[] {
-	return uses.filter((use) => wayOn(use, part.terms) !== null);
 }
 
 /** Sure ways first, then the slot's own material before its swaps in their order. */

@@ -1,6 +1,8 @@
 import type { Length } from '../length';
 import type { ConsumableSupply, SheetGoods, SheetSupply, Supply, ToolSupply } from '../stash';
+import { classifyDesigns } from './design-classes';
 import { printsOf, type Print } from './prints';
+import type { Uses } from './uses';
 
 /** A row of sheets, or what is left of one sheet that an earlier project opened, as the planner may use it. */
 export interface Sheet {
@@ -18,6 +20,8 @@ export interface Sheet {
 	/** Left over from a sheet that is already opened. */
 	readonly remnant: boolean;
 	readonly prints: readonly Print[];
+	/** Equal for rows that differ in their names, designs, colours and counts only. */
+	readonly sort: number;
 }
 
 /** The stash, sorted by what is asked of it. */
@@ -25,34 +29,53 @@ export interface Shelf {
 	readonly sheets: ReadonlyMap<SheetGoods, readonly Sheet[]>;
 	readonly consumables: readonly ConsumableSupply[];
 	readonly tools: readonly ToolSupply[];
+	/** What slots that ask for the same have found here. */
+	readonly found: Map<string, Uses>;
 }
 
+/** A row as far as it may be used: some of its sheets, or a remnant of one. */
+export type Stock = Pick<Sheet, 'w' | 'h' | 'x' | 'y' | 'count' | 'first' | 'remnant'> & {
+	readonly supply: SheetSupply;
+	readonly order: number;
+};
+
 export function shelve(supplies: readonly Supply[], kerf: Length): Shelf {
-	const sheets: Sheet[] = [];
+	const stock: Stock[] = [];
 	const consumables: ConsumableSupply[] = [];
 	const tools: ToolSupply[] = [];
 	supplies.forEach((supply, order) => {
-		if (supply.group === 'sheet') {
-			const sheet = sheetOf(supply, order, kerf);
-			if (sheet.count > 0 && sheet.w > 0 && sheet.h > 0) sheets.push(sheet);
-		} else if (supply.group === 'consumable') consumables.push(supply);
+		if (supply.group === 'sheet') stock.push(stockOf(supply, order, kerf));
+		else if (supply.group === 'consumable') consumables.push(supply);
 		else tools.push(supply);
 	});
-	return { sheets: byKind(sheets), consumables, tools };
+	return shelfOf(stock, consumables, tools);
 }
 
-export function byKind(sheets: readonly Sheet[]): Map<SheetGoods, Sheet[]> {
-	const kinds = new Map<SheetGoods, Sheet[]>();
-	for (const sheet of sheets) {
-		const row = kinds.get(sheet.supply.kind);
-		if (row) row.push(sheet);
-		else kinds.set(sheet.supply.kind, [sheet]);
-	}
-	return kinds;
+export function shelfOf(
+	stock: readonly Stock[],
+	consumables: readonly ConsumableSupply[],
+	tools: readonly ToolSupply[]
+): Shelf {
+	const classes = new Map<string, number[]>();
+	const classesOf = (design: string) => {
+		const known = classes.get(design) ?? [];
+		classes.set(design, known);
+		return known;
+	};
+	const usable = stock.filter(({ count, w, h }) => count > 0 && w > 0 && h > 0);
+	const sorts = new Map<string, number>();
+	const sheets = usable.map((one) => {
+		const name = sortOf(one);
+		const sort = sorts.get(name) ?? sorts.size;
+		sorts.set(name, sort);
+		return { ...one, prints: printsOf(one.supply, classesOf), sort };
+	});
+	classifyDesigns(sheets, classes);
+	return { sheets: byKind(sheets), consumables, tools, found: new Map() };
 }
 
 /** A branding strip comes off with the first cut, which takes at least the blade's width. */
-export function sheetOf(supply: SheetSupply, order: number, kerf: Length): Sheet {
+export function stockOf(supply: SheetSupply, order: number, kerf: Length): Stock {
 	const { strip } = supply;
 	const off = strip ? Math.max(strip.depth, kerf) : 0;
 	const across = strip?.edge === 'top' || strip?.edge === 'bottom';
@@ -65,17 +88,34 @@ export function sheetOf(supply: SheetSupply, order: number, kerf: Length): Sheet
 		y: strip?.edge === 'top' ? off : 0,
 		count: supply.sheets,
 		first: 1,
-		remnant: false,
-		prints: printsOf(supply)
+		remnant: false
 	};
 }
 
 /** The shelf without what arrives after that day. */
 export function shelfUntil(shelf: Shelf, day: string): Shelf {
 	const isHere = ({ arrives }: Supply) => arrives === null || arrives <= day;
-	return {
-		sheets: byKind([...shelf.sheets.values()].flat().filter(({ supply }) => isHere(supply))),
-		consumables: shelf.consumables.filter(isHere),
-		tools: shelf.tools.filter(isHere)
-	};
+	const stock = [...shelf.sheets.values()].flat().sort((a, b) => a.order - b.order);
+	return shelfOf(
+		stock.filter(({ supply }) => isHere(supply)),
+		shelf.consumables.filter(isHere),
+		shelf.tools.filter(isHere)
+	);
+}
+
+function sortOf({ supply, w, h, remnant }: Stock): string {
+	const { kind, weight, caliper, offcut, price, count, arrives, strip } = supply;
+	const cost = remnant || offcut ? 'left' : price ? `${price.amount} ${price.currency}` : '';
+	const paper = `${weight?.gsm ?? ''} ${caliper ?? ''} ${count} ${arrives ?? ''}`;
+	return `${kind} ${w} ${h} ${strip ? `${supply.w} ${supply.h}` : ''} ${cost}|${paper}`;
+}
+
+function byKind(sheets: readonly Sheet[]): Map<SheetGoods, Sheet[]> {
+	const kinds = new Map<SheetGoods, Sheet[]>();
+	for (const sheet of sheets) {
+		const row = kinds.get(sheet.supply.kind);
+		if (row) row.push(sheet);
+		else kinds.set(sheet.supply.kind, [sheet]);
+	}
+	return kinds;
 }

@@ -1,40 +1,39 @@
 import { checkPlan } from '../cutting';
 import { LIES, type CutProblem } from '../cutting/problem';
-import type { MatchOptions } from './verdict';
-import type { CostOf, Layout, Offer } from './layout';
+import type { CostOf, Layout } from './layout';
 import { lieOn } from './lies';
-import type { Part } from './parts';
+import type { Question, Row } from './question';
+import type { MatchOptions } from './verdict';
 
-/** The named layout put to the checker once more, as rows and pieces instead of merged kinds. */
+/** The layout put to the checker as the rows and pieces that it names, not as the kinds that were planned. */
 export function isSound(
-	parts: readonly Part[],
-	offers: readonly (readonly Offer[])[],
+	{ parts, cuts, kinds }: Question,
 	layout: Layout,
 	costOf: CostOf,
 	options: MatchOptions
 ): boolean {
-	const rows = [...new Set(layout.sheets.map(({ sheet }) => sheet))];
-	const cuts = parts.flatMap((part, p) => part.pieces.map((cut) => ({ part, p, cut })));
+	const opened = new Set(layout.sheets.map(({ sheet }) => sheet));
+	const rows: Row[] = kinds.flatMap((kind) => kind.rows.filter(({ sheet }) => opened.has(sheet)));
 	const problem: CutProblem = {
 		kerf: options.kerf,
 		interlocked: options.knife,
-		sheets: rows.map((sheet) => ({ w: sheet.w, h: sheet.h, count: sheet.count, cost: costOf(sheet) })),
-		pieces: cuts.map(({ part, p, cut }) => ({
+		sheets: rows.map(({ sheet }) => ({ w: sheet.w, h: sheet.h, count: sheet.count, cost: costOf(sheet) })),
+		pieces: cuts.map(({ part, cut }) => ({
 			w: cut.w,
 			h: cut.h,
 			qty: cut.qty,
-			lies: rows.map((sheet) => {
-				const offer = offers[p]?.find((one) => one.sheet === sheet);
-				return offer ? lieOn(cut, sheet, offer.prints, part.terms) : LIES.never;
+			lies: rows.map(({ sheet, offers }) => {
+				const [offer, terms] = [offers[part], parts[part]?.terms];
+				return offer && terms ? lieOn(cut, sheet, offer.prints, terms) : LIES.never;
 			})
 		}))
 	};
-	const sheets = layout.sheets.map((laid) => ({
-		sheet: rows.indexOf(laid.sheet),
-		cuts: laid.cuts,
-		offcuts: laid.offcuts,
-		placements: laid.placements.map(({ part, cut, x, y, w, h, turned }) => ({
-			piece: cuts.findIndex((known) => known.part === part && known.cut === cut),
+	const sheets = layout.sheets.map(({ sheet, placements, cuts: made, offcuts }) => ({
+		sheet: rows.findIndex((row) => row.sheet === sheet),
+		cuts: made,
+		offcuts,
+		placements: placements.map(({ cut, x, y, w, h, turned }) => ({
+			piece: cuts.findIndex((known) => known.cut === cut),
 			x,
 			y,
 			w,
