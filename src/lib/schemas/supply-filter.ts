@@ -27,6 +27,9 @@ export const supplyFilterSchema = z.object({
 	size: words,
 	offcut: flag,
 	unsure: flag,
+	/** Ordered, and not here yet. */
+	coming: flag,
+	lent: flag,
 	sort: z.enum(SORTS).optional().catch(undefined),
 	page: z.coerce.number().int().min(1).max(100_000).catch(1)
 });

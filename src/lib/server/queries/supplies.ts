@@ -1,6 +1,7 @@
 import { and, asc, count, desc, eq, getTableColumns, gt, inArray, isNotNull, isNull, sql } from 'drizzle-orm';
 import type { SQL } from 'drizzle-orm';
 import type { SupplyFilter } from '../../schemas/supply-filter';
+import { today } from '../clock';
 import type { Reader, Transaction } from '../db/client';
 import { acts, movements } from '../db/schema/ledger';
 import { users } from '../db/schema/people';
@@ -150,7 +151,8 @@ function live(actor: Actor): SQL | undefined {
 	return and(eq(supplies.roomId, actor.roomId), isNull(supplies.deletedAt));
 }
 
-function conditions({ group, kind, bin, collection, size, offcut, unsure, barcode }: SupplyFilter) {
+function conditions(filter: SupplyFilter) {
+	const { group, kind, bin, collection, size, offcut, unsure, coming, lent, barcode } = filter;
 	return [
 		group && eq(supplies.group, group),
 		kind && eq(supplies.kind, kind),
@@ -159,6 +161,8 @@ function conditions({ group, kind, bin, collection, size, offcut, unsure, barcod
 		barcode && eq(supplies.barcode, barcode),
 		offcut ? eq(supplies.offcut, true) : undefined,
 		unsure ? eq(supplies.count, 'unsure') : undefined,
+		coming ? gt(supplies.arrives, today()) : undefined,
+		lent ? isNotNull(supplies.lentUntil) : undefined,
 		size && holds(size)
 	].filter((condition) => condition !== undefined && condition !== null) as SQL[];
 }

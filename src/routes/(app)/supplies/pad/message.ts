@@ -1,0 +1,4 @@
+/** Why a pad was refused as a whole. */
+export interface PadMessage {
+	readonly text: string;
+}
