@@ -8,6 +8,9 @@ import type { Meter } from './meter';
 import type { Model, ModelPiece, ModelSheet } from './model';
 import type { Random } from './random';
 
+/** Units for looking through one sheet for a place. */
+const LOOK = 40;
+
 /** An opened sheet and the area of the pieces in it. */
 export interface FilledSheet extends Opened {
 	readonly used: number;
@@ -81,7 +84,7 @@ export class Inserter {
 		const judge = this.blinking(manner);
 		for (const p of pieces) {
 			if (this.placeAmong(sheets, p, judge)) continue;
-			const kind = this.kindToOpen(p, manner.limit - cost, manner.opens);
+			const kind = this.kindToOpen(p, manner.limit - cost, manner);
 			if (kind < 0) outside.push(p);
 			else {
 				sheets.push(this.openFor(p, kind));
@@ -102,14 +105,14 @@ export class Inserter {
 		const piece = this.piece(p);
 		const spot: Spot = { score: Infinity, target: null, axis: 1, turned: false };
 		let chosen = -1;
-		let looked = 4;
+		let looked = LOOK;
 		for (let i = 0; i < sheets.length; i++) {
 			const { sheet, box, used } = sheets[i] as FilledSheet;
 			const { w, h, area, lies } = this.sheet(sheet);
 			if (area - used < piece.area) continue;
 			const lie = lies[p] as number;
 			const before = spot.score;
-			looked += 4;
+			looked += LOOK;
 			if (lie & 1) findSpot(box, PIECE, w - box.w, h - box.h, piece.w, piece.h, false, judge, spot);
 			if (lie & 2) findSpot(box, PIECE, w - box.w, h - box.h, piece.h, piece.w, true, judge, spot);
 			if (spot.score < before) chosen = i;
@@ -131,7 +134,7 @@ export class Inserter {
 		return { sheet: kind, box: leaf(p, piece, turned), used: piece.area };
 	}
 
-	private kindToOpen(piece: number, budget: number, opens: Manner['opens']): number {
+	private kindToOpen(piece: number, budget: number, { opens }: Manner): number {
 		let best = -1;
 		let least = Infinity;
 		for (let s = 0; s < this.model.sheets.length; s++) {

@@ -1,4 +1,4 @@
-/** Counts the search's work. One unit is roughly one box or one pair of boxes looked at, some tens of nanoseconds. */
+/** Counts the search's work. One unit is one pair of boxes joined, some tens of nanoseconds; the rest is priced to match. */
 import type { CutBudget } from './problem';
 
 const POLL = 2_000;

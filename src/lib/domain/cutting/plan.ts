@@ -54,7 +54,6 @@ class Search {
 	private best: { readonly opened: readonly Opened[]; readonly cost: number } | null = null;
 	private bound = 0;
 	private impossible = false;
-	private targets: readonly Combination[] = [];
 
 	constructor(
 		private readonly problem: CutProblem,
@@ -94,7 +93,7 @@ class Search {
 	}
 
 	private *climb(start: State): Generator<undefined> {
-		for (const state of improve(this.inserter, start, () => this.targets)) {
+		for (const state of improve(this.inserter, start)) {
 			if (state) this.take(state);
 			yield;
 		}
@@ -138,7 +137,6 @@ class Search {
 		while (!this.done) {
 			const batch = yield* this.nextBatch(combinations);
 			if (batch.length === 0) return this.raise(combinations.bound);
-			this.targets = batch;
 			if (!Patterns.few(this.model)) return;
 			const loss = this.best ? Math.max(...batch.map((combination) => this.spare(combination))) : Infinity;
 			if (!patterns || loss > known) patterns = yield* Patterns.of(this.model, (known = loss), this.meter);
