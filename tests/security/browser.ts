@@ -28,6 +28,7 @@ export class Browser {
 	constructor(readonly from = anotherNetwork()) {}
 
 	ask(path: string, { method = 'GET', headers = {}, body, from = this.from }: Asking = {}): Promise<Answer> {
+		const length = body === undefined ? {} : { 'content-length': String(Buffer.byteLength(body)) };
 		const cookie = [...this.cookies].map(([name, value]) => `${name}=${value}`).join('; ');
 		return new Promise((resolve, reject) => {
 			const sent = request(
@@ -35,7 +36,7 @@ export class Browser {
 				{
 					method,
 					localAddress: from,
-					headers: { accept: 'text/html', ...(cookie && { cookie }), ...headers },
+					headers: { accept: 'text/html', ...(cookie && { cookie }), ...length, ...headers },
 					agent: false
 				},
 				(response) => {
