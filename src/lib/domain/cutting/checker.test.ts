@@ -5,7 +5,7 @@ import { cutProblems } from '../../../../tests/factories/cut-problems';
 import type { CutPlan, CutProblem, CutSheet, Placement } from './problem';
 
 const planned = cutProblems()
-	.map((problem) => ({ problem, answer: planCuts(problem, { work: 500_000 }) }))
+	.map((problem) => ({ problem, answer: planCuts(problem, { work: 500_000, polish: 1_000 }) }))
 	.filter(({ answer }) => answer.status === 'planned')
 	.map(({ problem, answer }) => ({ problem, plan: (answer as { plan: CutPlan }).plan }));
 

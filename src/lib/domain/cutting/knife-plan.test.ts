@@ -4,7 +4,7 @@ import { checkPlan, planCuts } from '.';
 import { cutProblems } from '../../../../tests/factories/cut-problems';
 import type { CutProblem } from './problem';
 
-const budget = { work: 500_000 };
+const budget = { work: 500_000, polish: 1_000 };
 
 /** Four blades of 3 x 2 round a middle of 1 x 1 fill 5 x 5 exactly, and only as a pinwheel. */
 const pinwheel: CutProblem = {

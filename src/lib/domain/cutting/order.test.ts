@@ -5,7 +5,7 @@ import { cutProblems } from '../../../../tests/factories/cut-problems';
 import type { CutSheet, Rect } from './problem';
 
 const sheets = cutProblems().map((problem) => {
-	const answer = planCuts(problem, { work: 500_000 });
+	const answer = planCuts(problem, { work: 500_000, polish: 1_000 });
 	return { problem, plan: answer.status === 'planned' ? answer.plan : { sheets: [], cost: [0, 0] as const } };
 });
 
