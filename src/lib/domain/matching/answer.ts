@@ -1,40 +1,66 @@
 import { plannedSheet, reachOf } from './assembly';
-import type { Matched } from './project';
+import type { LaidSheet } from './layout';
+import type { Matched, PricedLayout } from './project';
 import type { Shelf } from './shelf';
-import type { MatchOptions, Plan, ProjectResult } from './verdict';
+import type { MatchOptions, Plan, PlannedSheet, ProjectResult } from './verdict';
 
+/** `layouts`: all in which the project's pieces may lie; other projects' pieces may lie there too. */
 export function answerOf(
 	matched: Matched,
-	shelf: Shelf,
+	layouts: readonly PricedLayout[],
+	tools: Shelf['tools'],
 	options: MatchOptions,
-	nowIfFirst = false
+	nowIfFirst: boolean
 ): ProjectResult {
 	const { bill, copies, verdict, after, lines, short, near } = matched;
+	const plan = planOf(bill.key, layouts, tools, options);
+	return { project: bill.key, copies, verdict, after, nowIfFirst, lines, short, near, plan };
+}
+
+function planOf(
+	project: string,
+	layouts: readonly PricedLayout[],
+	tools: Shelf['tools'],
+	options: MatchOptions
+): Plan | null {
+	const own = layouts.filter(({ layout }) => layout.sheets.some((sheet) => isIn(project, sheet)));
+	if (own.length === 0) return null;
+	const reach = reachOf(tools, options);
+	const whole = new Map<string, { sheet: PlannedSheet; order: number }>();
+	for (const laid of layouts.flatMap(({ layout }) => layout.sheets)) {
+		const key = JSON.stringify([laid.sheet.supply.key, laid.nth]);
+		const known = whole.get(key)?.sheet;
+		const added = plannedSheet(laid, reach, options);
+		whole.set(key, { sheet: known ? cutFurther(known, added, laid) : added, order: laid.sheet.order });
+	}
+	const sheets = [...whole.values()]
+		.filter(({ sheet }) => sheet.placements.some((placement) => placement.project === project))
+		.sort((a, b) => a.order - b.order || a.sheet.nth - b.sheet.nth);
+	return { proof: proofOf(own), sheets: sheets.map(({ sheet }) => keptOffcuts(sheet, options)) };
+}
+
+function isIn(project: string, { placements }: LaidSheet): boolean {
+	return placements.some(({ part }) => part.project === project);
+}
+
+/** A sheet of which a remnant was cut from for another project. */
+function cutFurther(sheet: PlannedSheet, added: PlannedSheet, { sheet: remnant }: LaidSheet): PlannedSheet {
+	const isLeft = ({ x, y, w, h }: PlannedSheet['offcuts'][number]) =>
+		x !== remnant.x || y !== remnant.y || w !== remnant.w || h !== remnant.h;
 	return {
-		project: bill.key,
-		copies,
-		verdict,
-		after,
-		nowIfFirst,
-		lines,
-		short,
-		near,
-		plan: planOf(matched, shelf, options)
+		...sheet,
+		placements: [...sheet.placements, ...added.placements],
+		cuts: [...sheet.cuts, ...added.cuts],
+		offcuts: [...sheet.offcuts.filter(isLeft), ...added.offcuts]
 	};
 }
 
-function planOf({ layouts }: Matched, shelf: Shelf, options: MatchOptions): Plan | null {
-	const laid = layouts.flatMap(({ layout }) => layout.sheets);
-	if (laid.length === 0) return null;
-	const reach = reachOf(shelf.tools, options);
-	const sheets = [...laid]
-		.sort((a, b) => a.sheet.order - b.sheet.order || a.nth - b.nth)
-		.map((sheet) => plannedSheet(sheet, reach, options));
-	return { proof: proofOf(layouts), sheets };
+function keptOffcuts(sheet: PlannedSheet, { keepOffcut }: MatchOptions): PlannedSheet {
+	return { ...sheet, offcuts: sheet.offcuts.filter(({ w, h }) => Math.min(w, h) >= (keepOffcut ?? 0)) };
 }
 
 /** Whole sheets that any plan opens, from the bounds on their cost. */
-function proofOf(layouts: Matched['layouts']): Plan['proof'] {
+function proofOf(layouts: readonly PricedLayout[]): Plan['proof'] {
 	if (layouts.every(({ layout }) => layout.minimum)) return 'minimum';
 	const atLeast = layouts.reduce((sum, { layout, dearest }) => sum + Math.ceil(layout.bound[0] / dearest), 0);
 	return { atLeast };

@@ -33,7 +33,7 @@ export function plannedSheet(
 		cuts: [...(sheet.remnant ? [] : stripCut(sheet, options.kerf)), ...shifted].map((cut) =>
 			byReach(cut, reach)
 		),
-		offcuts: offcuts.map(moved).filter((offcut) => Math.min(offcut.w, offcut.h) >= (options.keepOffcut ?? 0))
+		offcuts: offcuts.map(moved)
 	};
 }
 

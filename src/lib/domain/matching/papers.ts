@@ -28,7 +28,7 @@ export function findPapers(seats: readonly Seat[], first: Terms, costOf: CostOf,
 }
 
 export function seatOn(seat: Seat, terms: Terms): Seat {
-	return { ...seat, part: onTerms(seat.part, terms) };
+	return seat.part.promised ? seat : { ...seat, part: onTerms(seat.part, terms) };
 }
 
 type Planned = Extract<Choice, { status: 'planned' }>;
@@ -59,6 +59,7 @@ class Climber {
 	): { seats: readonly Seat[]; choice: Planned } {
 		let settled = { seats, choice };
 		seats.forEach((seat, i) => {
+			if (seat.part.promised) return;
 			for (const terms of milderThan(seat.part.terms, first)) {
 				const tried = settled.seats.map((other, j) => (j === i ? seatOn(other, terms) : other));
 				const milder = this.choose(tried);

@@ -30,6 +30,8 @@ export interface Part {
 	readonly differs: ReadonlySet<string>;
 	readonly pieces: readonly Cuttable[];
 	readonly terms: Terms;
+	/** Promised already in a queue: laid out again beside others, but on its own terms only. */
+	readonly promised: boolean;
 }
 
 export function partsOf(bill: Bill, copies: number, on: string): Part[] {
@@ -52,7 +54,8 @@ export function partsOf(bill: Bill, copies: number, on: string): Part[] {
 				single: group.slots.length > 1 || slot.designs === 'one',
 				differs: group.differs,
 				pieces,
-				terms: { on, level: 0, unsure: false, cutsBoard: true }
+				terms: { on, level: 0, unsure: false, cutsBoard: true },
+				promised: false
 			}
 		];
 	});

@@ -5,11 +5,11 @@ import { drawConsumables } from './consumables';
 import type { Bench, CostOf, Layout } from './layout';
 import { isCutAlready } from './lies';
 import { nearMisses } from './near';
-import { partsOf, type Terms } from './parts';
+import { partsOf, type Part, type Terms } from './parts';
 import { findPapers } from './papers';
 import { shelfUntil, type Shelf } from './shelf';
 import { lackOf } from './shortage';
-import { lineOf, OUT_OF_TIME, slotLine, worst } from './slot-lines';
+import { isWorse, lineOf, OUT_OF_TIME, slotLine, worst } from './slot-lines';
 import { toolLine, toolLineOn } from './tool-lines';
 import { BOARD_CUT, cutsOf, demandsOf, toolDates, type Demand } from './tools';
 import type { LineResult, NearMiss, Shortage, Verdict } from './verdict';
@@ -24,6 +24,8 @@ export interface Matched {
 	readonly short: readonly Shortage[];
 	readonly near: readonly NearMiss[];
 	readonly layouts: readonly PricedLayout[];
+	/** The slots with paper, on the terms on which they found it. */
+	readonly parts: readonly Part[];
 	/** What each row of consumables gives, by its key. */
 	readonly drawn: ReadonlyMap<string, number>;
 }
@@ -34,17 +36,20 @@ export interface PricedLayout {
 	readonly dearest: number;
 }
 
+/** What is to be matched. `beside`: slots of other projects that keep what they have, wherever it is laid. */
+export interface Task {
+	readonly bill: Bill;
+	readonly copies: number;
+	readonly on: string;
+	readonly beside: readonly Part[];
+}
+
 /** Matches one bill. `until`: nothing that comes later than this day counts; null where any wait will do. */
-export function matchBill(
-	bill: Bill,
-	copies: number,
-	shelf: Shelf,
-	on: string,
-	bench: Bench,
-	until: string | null = null
-): Matched {
+export function matchBill(task: Task, shelf: Shelf, bench: Bench, until: string | null = null): Matched {
+	const { bill, copies, on, beside } = task;
 	const stock = until === null ? shelf : shelfUntil(shelf, until);
-	const seats = componentsOf(partsOf(bill, copies, on), stock);
+	const all = componentsOf([...beside, ...partsOf(bill, copies, on)], stock);
+	const seats = all.filter((component) => component.some(({ part }) => !part.promised));
 	const demands = demandsOf(bill);
 	const board = boardLine(demands, stock, on, until);
 	const found = seats.map((component) => findComponent(component, on, board.line, bench));
@@ -65,20 +70,22 @@ export function matchBill(
 		short: [...found.flatMap(({ short }) => short), ...consumables.short, ...toolShortages(lines, asked)],
 		near: found.flatMap(({ near }) => near),
 		layouts: found.flatMap(({ layout }) => layout ?? []),
+		parts: found.flatMap(({ parts }) => parts),
 		drawn: consumables.drawn
 	};
-	return matched.verdict === 'short' ? matched : onOneDay(matched, asked, shelf, on, bench, until);
+	return matched.verdict === 'short' ? matched : onOneDay(matched, asked, task, shelf, bench, until);
 }
 
 /** The earliest day on which every line holds; a project without one is short, unless a look today could spare the wait. */
 function onOneDay(
 	matched: Matched,
 	demands: readonly Demand[],
+	task: Task,
 	shelf: Shelf,
-	on: string,
 	bench: Bench,
 	until: string | null
 ): Matched {
+	const { on } = task;
 	const waits = matched.lines.flatMap(({ after }) => after ?? []).sort();
 	const earliest = waits.at(-1);
 	if (earliest === undefined) return matched;
@@ -93,7 +100,7 @@ function onOneDay(
 	}
 	if (until === null) {
 		for (const sooner of [on, ...waits.filter((day) => day < earliest)]) {
-			const instead = matchBill(matched.bill, matched.copies, shelf, on, bench, sooner);
+			const instead = matchBill(task, shelf, bench, sooner);
 			if (instead.verdict !== 'short') return instead;
 		}
 	}
@@ -142,6 +149,7 @@ interface Found {
 	readonly short: readonly Shortage[];
 	readonly near: readonly NearMiss[];
 	readonly layout: PricedLayout | null;
+	readonly parts: readonly Part[];
 	/** Chipboard is cut, not only used as it is. */
 	readonly cutsBoard: boolean;
 }
@@ -157,8 +165,9 @@ function findComponent(seats: readonly Seat[], on: string, board: LineResult, be
 	return isWorse(worst([rank(cut), board.verdict]), rank(uncut)) || rank(cut) === rank(uncut) ? uncut : cut;
 }
 
-function findWith(seats: readonly Seat[], first: Terms, costOf: CostOf, bench: Bench): Found {
-	const papers = findPapers(seats, first, costOf, bench);
+function findWith(all: readonly Seat[], first: Terms, costOf: CostOf, bench: Bench): Found {
+	const papers = findPapers(all, first, costOf, bench);
+	const seats = all.filter(({ part }) => !part.promised);
 	if (!papers.layout && papers.timedOut) {
 		const lines = seats.map(({ part }): LineResult => ({
 			line: lineOf(part),
@@ -167,11 +176,20 @@ function findWith(seats: readonly Seat[], first: Terms, costOf: CostOf, bench: B
 			swap: null,
 			why: OUT_OF_TIME
 		}));
-		return { lines, short: [], near: [], layout: null, cutsBoard: false };
+		return { lines, short: [], near: [], layout: null, parts: [], cutsBoard: false };
+	}
+	if (!papers.layout && seats.length < all.length) {
+		const lines = seats.map(({ part }): LineResult => ({
+			line: lineOf(part),
+			verdict: 'short',
+			supplies: [],
+			swap: null
+		}));
+		return { lines, short: [], near: [], layout: null, parts: [], cutsBoard: false };
 	}
 	const lack = papers.layout ? null : lackOf(seats, first, costOf, bench);
 	const layout = papers.layout ?? lack?.layout ?? null;
-	const lines = lack?.lines ?? papers.seats.map(({ part }) => slotLine(part, layout as Layout, first.on));
+	const lines = lack?.lines ?? seats.map(({ part }) => slotLine(part, layout as Layout, first.on));
 	const near = seats.flatMap((seat, s) =>
 		lines[s]?.verdict === 'now' ? [] : nearMisses(seat, bench.options)
 	);
@@ -179,7 +197,8 @@ function findWith(seats: readonly Seat[], first: Terms, costOf: CostOf, bench: B
 		lines,
 		short: lack?.short ?? [],
 		near,
-		layout: layout && { layout, dearest: dearestOf(seats) },
+		layout: layout && { layout, dearest: dearestOf(all) },
+		parts: papers.layout ? papers.seats.map(({ part }) => part) : [],
 		cutsBoard: layout !== null && cutsChipboard(layout)
 	};
 }
@@ -189,10 +208,6 @@ function cutsChipboard(layout: Layout): boolean {
 		({ sheet, placements }) =>
 			sheet.supply.kind === 'chipboard' && placements.some(({ cut }) => !isCutAlready(cut, sheet))
 	);
-}
-
-function isWorse(a: Verdict, b: Verdict): boolean {
-	return a !== b && worst([a, b]) === a;
 }
 
 function inBillsOrder(bill: Bill, lines: readonly LineResult[]): LineResult[] {

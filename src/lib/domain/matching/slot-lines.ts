@@ -47,3 +47,7 @@ export function isOf(part: Part, { part: { project, slot } }: Pick<Laid, 'part'>
 export function worst(verdicts: readonly Verdict[]): Verdict {
 	return VERDICTS[Math.max(0, ...verdicts.map((verdict) => VERDICTS.indexOf(verdict)))] ?? 'now';
 }
+
+export function isWorse(a: Verdict, b: Verdict): boolean {
+	return VERDICTS.indexOf(a) > VERDICTS.indexOf(b);
+}
