@@ -10,8 +10,8 @@ export default defineConfig({
 	workers: 2,
 	retries: 0,
 	forbidOnly: true,
-	timeout: 90_000,
-	expect: { timeout: 10_000 },
+	timeout: 240_000,
+	expect: { timeout: 20_000 },
 	reporter: 'line',
 	use: {
 		...devices['Desktop Chrome'],

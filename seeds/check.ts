@@ -51,6 +51,7 @@ const shown: Record<string, boolean> = {
 		findings.length > 0 && findings.every((found) => found.startsWith('parcel-tags')),
 	'a face that is lost': each.some(losesAFace),
 	'a sheet that two projects share': sharesASheet(queue),
+	'no two pieces in one place': ![...each, ...queue].some(overlaps),
 	'a contention in the queue': queue.some(({ nowIfFirst }) => nowIfFirst)
 };
 const missing = Object.entries(shown).filter(([, there]) => !there);
@@ -65,6 +66,16 @@ function match(mode: MatchMode): readonly ProjectResult[] {
 	const options = { ...DEFAULT_OPTIONS, reach: 12.25 * INCH, keepOffcut: INCH };
 	return matchProjects({ bills, supplies, mode, copies: {}, on: today, options }, { work: 200_000_000 })
 		.results;
+}
+
+function overlaps({ plan }: ProjectResult): boolean {
+	return (plan?.sheets ?? []).some(({ placements }) =>
+		placements.some((a, nth) =>
+			placements
+				.slice(nth + 1)
+				.some((b) => a.x < b.x + b.w && b.x < a.x + a.w && a.y < b.y + b.h && b.y < a.y + a.h)
+		)
+	);
 }
 
 function losesAFace({ plan }: ProjectResult): boolean {
