@@ -33,15 +33,21 @@ interface Thread {
 }
 
 const MOST_WAITING = { room: 200, visitor: 20 };
-/** Reading the question and writing the answer come on top of what the search allows itself. */
-const GRACE_MS = 10_000;
 const IDLE_MS = 60_000;
 
 /** The running server's matcher: threads from the built file, this thread where there is none. */
 export const matcher = openMatcher(import.meta.env?.DEV ? null : resolve('build/workers/match.js'));
 
-/** @param file the built host of the matcher; null, or a file that isn't there, answers on this thread */
-export function openMatcher(file: string | null, most = Math.min(2, availableParallelism())): Matcher {
+/**
+ * @param file the built host of the matcher; null, or a file that isn't there, answers on this thread
+ * @param most threads at once
+ * @param graceMs what reading the question and writing the answer may take on top of a question's own budget
+ */
+export function openMatcher(
+	file: string | null,
+	most = Math.min(2, availableParallelism()),
+	graceMs = 10_000
+): Matcher {
 	if (file === null || !existsSync(file)) return { ask: answerHere, close: async () => {} };
 	const threads = new Set<Thread>();
 	const waiting: Record<Rank, Job[]> = { room: [], visitor: [] };
@@ -63,7 +69,7 @@ export function openMatcher(file: string | null, most = Math.min(2, availablePar
 		const thread = free ?? start();
 		clearTimeout(thread.timer);
 		thread.job = job;
-		thread.timer = setTimeout(() => end(thread, new TooMany(5, BUSY)), job.budgetMs + GRACE_MS);
+		thread.timer = setTimeout(() => end(thread, new TooMany(5, BUSY)), job.budgetMs + graceMs);
 		thread.worker.postMessage({ id: ++message, question: job.question });
 	}
 

@@ -1,5 +1,5 @@
 import { readMatchRequest, Unreadable, type Issue } from '../domain/exchange';
-import { matchProjects } from '../domain/matching';
+import { matchProjects, unlocks, type Unlock } from '../domain/matching';
 import type { MatchResponse } from '../domain/matching/verdict';
 import { readStash } from '../domain/stash-row';
 
@@ -11,10 +11,12 @@ export interface MatchQuestion {
 	readonly request: unknown;
 	readonly today: string;
 	readonly stash?: string;
+	/** Also asks which purchases would turn projects to *now*; takes as long again. */
+	readonly unlocks?: boolean;
 }
 
 export type MatchReply =
-	| { readonly ok: true; readonly response: MatchResponse }
+	| { readonly ok: true; readonly response: MatchResponse; readonly unlocks?: readonly Unlock[] }
 	| { readonly ok: false; readonly issues: readonly Issue[] };
 
 /** About what a millisecond of an ordinary processor does; only the clock ends a slower one sooner. */
@@ -23,10 +25,13 @@ const WORK_PER_MS = 20_000;
 /** The one entry point of every host. `stopAfter` starts a clock and says when so many milliseconds are over. */
 export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => () => boolean): MatchReply {
 	try {
-		const { budgetMs, ...request } = readMatchRequest(question.request, question.today);
-		const budget = { work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) };
-		const supplies = question.stash === undefined ? request.supplies : readStash(question.stash);
-		return { ok: true, response: matchProjects({ ...request, supplies }, budget) };
+		const { budgetMs, ...read } = readMatchRequest(question.request, question.today);
+		const supplies = question.stash === undefined ? read.supplies : readStash(question.stash);
+		const request = { ...read, supplies };
+		const budget = () => ({ work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) });
+		const response = matchProjects(request, budget());
+		if (!question.unlocks) return { ok: true, response };
+		return { ok: true, response, unlocks: unlocks(request, response, budget()) };
 	} catch (error) {
 		if (error instanceof Unreadable) return { ok: false, issues: error.issues };
 		throw error;

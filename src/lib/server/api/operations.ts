@@ -67,6 +67,11 @@ export const operations = {
 		access: 'viewer',
 		query: asking
 	},
+	'GET /api/rooms/{room}/unlocks': {
+		summary: 'What can be bought, and the projects that each purchase alone would turn to now; most first.',
+		access: 'viewer',
+		query: asking.pick({ on: true })
+	},
 	'GET /api/rooms/{room}/supplies': {
 		summary: 'A page of the stash, filtered.',
 		access: 'viewer',

@@ -3,6 +3,7 @@ import Fuse, { type Expression } from 'fuse.js';
 import type { Reader } from '../db/client';
 import { rooms } from '../db/schema/rooms';
 import { bins, supplies } from '../db/schema/supplies';
+import { Reckonings } from '../reckonings';
 import type { Actor } from '../session';
 
 interface Entry {
@@ -11,37 +12,22 @@ interface Entry {
 	readonly text: string;
 }
 
-interface Index {
-	readonly revision: number;
-	readonly fuse: Fuse<Entry>;
-}
-
-/** Rooms whose words are kept ready, the last used at the end. */
-const ready = new Map<string, Index>();
-const MOST_READY = 16;
+/** Each room's words, kept ready. */
+const indexes = new Reckonings<Fuse<Entry>>(16);
 const MOST_WORDS = 6;
 
 /** Ids of the room's supplies that hold every one of the words, give or take a typing slip, best first. */
 export async function rankByWords(db: Reader, actor: Actor, typed: string): Promise<string[]> {
 	const words = typed.trim().split(/\s+/).slice(0, MOST_WORDS);
-	const { fuse } = await indexOf(db, actor);
+	const fuse = await indexOf(db, actor);
 	const either = (word: string): Expression => ({ $or: [{ name: word }, { text: word }] });
 	const query: Expression = { $and: words.map(either) };
 	return fuse.search(query).map(({ item }) => item.id);
 }
 
-async function indexOf(db: Reader, actor: Actor): Promise<Index> {
+async function indexOf(db: Reader, actor: Actor): Promise<Fuse<Entry>> {
 	const [room] = await db.select({ revision: rooms.revision }).from(rooms).where(eq(rooms.id, actor.roomId));
-	const revision = room?.revision ?? 0;
-	const kept = ready.get(actor.roomId);
-	ready.delete(actor.roomId);
-	const index = kept?.revision === revision ? kept : { revision, fuse: await build(db, actor) };
-	ready.set(actor.roomId, index);
-	for (const [oldest] of ready) {
-		if (ready.size <= MOST_READY) break;
-		ready.delete(oldest);
-	}
-	return index;
+	return indexes.of(actor.roomId, room?.revision ?? 0, () => build(db, actor));
 }
 
 async function build(db: Reader, actor: Actor): Promise<Fuse<Entry>> {

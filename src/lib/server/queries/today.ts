@@ -1,10 +1,12 @@
 import { eq } from 'drizzle-orm';
 import { writeExact } from '../../domain/length';
+import type { Unlock } from '../../domain/matching';
 import type { ProjectResult } from '../../domain/matching/verdict';
 import type { Reader } from '../db/client';
 import { rooms } from '../db/schema/rooms';
 import { Invalid, NotFound } from '../errors';
 import { matcher, type Matcher } from '../matcher';
+import { Reckonings } from '../reckonings';
 import type { Actor } from '../session';
 import { listProjects, type ProjectRow } from './projects';
 import { stashText } from './stash';
@@ -26,11 +28,10 @@ export interface TodayRow {
 	readonly result: ProjectResult;
 }
 
-/** What a room's whole ranking may take. */
+/** What a room's whole ranking may take, and the same again for its unlocks. */
 const BUDGET_MS = 5000;
-/** Rankings kept, by room, mode and date; each serves until its room changes. */
-const kept = new Map<string, { revision: number; today: Promise<Today> }>();
-const MOST_KEPT = 32;
+const rankings = new Reckonings<Today>(32);
+const purchases = new Reckonings<readonly Unlock[]>(32);
 
 /** What can be made from the room's stash on a date: every project in the queue's order with what the matcher says. */
 export async function todayFor(
@@ -39,22 +40,10 @@ export async function todayFor(
 	asking: Asking,
 	by: Matcher = matcher
 ): Promise<Today> {
-	const [room] = await db.select().from(rooms).where(eq(rooms.id, actor.roomId));
-	if (!room) throw new NotFound();
-	const name = `${actor.roomId} ${asking.mode} ${asking.on}`;
-	const known = kept.get(name);
-	kept.delete(name);
-	const fresh =
-		known?.revision === room.revision
-			? known
-			: { revision: room.revision, today: rank(db, actor, room, asking, by) };
-	fresh.today.catch(() => kept.get(name) === fresh && kept.delete(name));
-	kept.set(name, fresh);
-	for (const [oldest] of kept) {
-		if (kept.size <= MOST_KEPT) break;
-		kept.delete(oldest);
-	}
-	return fresh.today;
+	const room = await roomOf(db, actor);
+	return rankings.of(`${room.id} ${asking.mode} ${asking.on}`, room.revision, () =>
+		rank(db, actor, room, asking, by)
+	);
 }
 
 /** What the matcher says of one project. @throws {NotFound} */
@@ -70,15 +59,52 @@ export async function todayForProject(
 	return row;
 }
 
-async function rank(
+/**
+ * What can be bought, and the projects by key that each purchase alone turns to *now*; most first. It tries every
+ * missing thing, so it takes longer than the ranking: a page shows that first and streams this after it.
+ */
+export async function unlocksFor(
 	db: Reader,
 	actor: Actor,
-	room: typeof rooms.$inferSelect,
-	{ mode, on }: Asking,
-	by: Matcher
-): Promise<Today> {
+	on: string,
+	by: Matcher = matcher
+): Promise<readonly Unlock[]> {
+	const room = await roomOf(db, actor);
+	return purchases.of(`${room.id} ${on}`, room.revision, async () => {
+		const projects = await listProjects(db, actor);
+		const { unlocks = [] } = await asked(db, actor, room, projects, { mode: 'each', on }, by, true);
+		return unlocks;
+	});
+}
+
+type Room = typeof rooms.$inferSelect;
+
+async function roomOf(db: Reader, actor: Actor): Promise<Room> {
+	const [room] = await db.select().from(rooms).where(eq(rooms.id, actor.roomId));
+	if (!room) throw new NotFound();
+	return room;
+}
+
+async function rank(db: Reader, actor: Actor, room: Room, asking: Asking, by: Matcher): Promise<Today> {
 	const projects = await listProjects(db, actor);
-	const { units, reach, keepOffcut } = room;
+	const { response } = await asked(db, actor, room, projects, asking, by, false);
+	const results = new Map(response.results.map((result) => [result.project, result]));
+	const rows = projects.flatMap((project) => {
+		const result = results.get(project.key);
+		return result ? [{ project, result }] : [];
+	});
+	return { ...asking, revision: room.revision, rows };
+}
+
+async function asked(
+	db: Reader,
+	actor: Actor,
+	{ units, reach, keepOffcut }: Room,
+	projects: readonly ProjectRow[],
+	{ mode, on }: Asking,
+	by: Matcher,
+	unlocks: boolean
+) {
 	const request = {
 		projects: projects.map(({ bill }) => bill),
 		supplies: [],
@@ -91,13 +117,7 @@ async function rank(
 		}
 	};
 	const stash = await stashText(db, actor);
-	const reply = await by.ask({ request, today: on, stash }, BUDGET_MS, 'room');
-	if (!reply.ok)
-		throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
-	const results = new Map(reply.response.results.map((result) => [result.project, result]));
-	const rows = projects.flatMap((project) => {
-		const result = results.get(project.key);
-		return result ? [{ project, result }] : [];
-	});
-	return { mode, on, revision: room.revision, rows };
+	const reply = await by.ask({ request, today: on, stash, unlocks }, 2 * BUDGET_MS, 'room');
+	if (reply.ok) return reply;
+	throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
 }
