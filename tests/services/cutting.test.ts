@@ -110,6 +110,24 @@ describe('cutting a plan', () => {
 		expect(offcuts.map(({ h }) => h)).toEqual([7.75 * INCH]);
 	});
 
+	it('keeps just the offcuts that are named, whatever the room’s smallest', async () => {
+		const { actor, cardsId } = await bench({ keepOffcut: 2 * INCH });
+		const input = { id: v7(), project: cardsId, plan: plan(), kept: ['0.0'] };
+		await db.write((tx) => useSheets(tx, actor, useSheetsSchema.parse(input)));
+		const offcuts = (await stashOf(actor)).filter(({ offcut }) => offcut);
+		expect(offcuts.map(({ w }) => w)).toEqual([INCH]);
+	});
+
+	it('files what the plan lists, which leaves out what is too small to keep', async () => {
+		const { actor, cardsId } = await bench();
+		await cut(
+			actor,
+			cardsId,
+			plan((sheet) => sheet.offcuts.shift())
+		);
+		expect((await stashOf(actor)).filter(({ offcut }) => offcut)).toMatchObject([{ h: 7.75 * INCH }]);
+	});
+
 	it('takes an offcut out as one', async () => {
 		const { actor, cardsId } = await bench();
 		const key = 'left';
@@ -207,7 +225,7 @@ describe('a plan that the stash no longer bears', () => {
 		['pieces that overlap', (s) => (s.placements[1]!.x -= INCH)],
 		['a cut through a piece', (s) => (s.cuts[0]!.at -= INCH)],
 		['an offcut that isn’t left', (s) => (s.offcuts[1]!.h += INCH)],
-		['an offcut kept back', (s) => s.offcuts.pop()],
+		['an offcut that is a piece', (s) => s.offcuts.push(s.placements[0]!)],
 		['the same offcut twice', (s) => s.offcuts.push(s.offcuts[1]!)],
 		['no cuts', (s) => (s.cuts = [])]
 	])('is refused with %s', async (_, change) => {

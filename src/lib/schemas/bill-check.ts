@@ -24,12 +24,14 @@ export interface CheckedDraft {
 export function checkDraft(draft: BillDraft, roomUnits: Units): CheckedDraft {
 	const units = unitsOf(draft, roomUnits);
 	const document = documentOf(draft);
-	const { bill, issues } = readDraft(draft, document, units);
+	const read = lengthReader(draft, units);
+	const issues = { ...measureIssues(draft), ...lengthIssues(draft, read) };
+	const bill = readDraft(draft, document, units, issues);
 	return {
 		document,
 		issues,
 		findings: bill ? proofread(bill, units) : [],
-		sketches: sketchesOf(draft, units)
+		sketches: draft.pieces.map((piece) => sketch(piece, read))
 	};
 }
 
@@ -39,20 +41,38 @@ export const billOf = ({ document }: CheckedDraft) => document as BillDocument;
 const unitsOf = (draft: BillDraft, roomUnits: Units): Units =>
 	draft.units === 'in' || draft.units === 'mm' || draft.units === 'cm' ? draft.units : roomUnits;
 
+/** Adds what the schema refuses to the issues; a bill only where there are none. */
 function readDraft(
 	draft: BillDraft,
 	document: Record<string, unknown>,
-	units: Units
-): { bill: Bill | null; issues: Record<string, string> } {
-	const issues = measureIssues(draft);
+	units: Units,
+	issues: Record<string, string>
+): Bill | null {
 	try {
 		const bill = readBill(document, units);
-		return { bill: Object.keys(issues).length > 0 ? null : bill, issues };
+		return Object.keys(issues).length > 0 ? null : bill;
 	} catch (trouble) {
 		if (!(trouble instanceof Unreadable)) throw trouble;
 		for (const { path, message } of trouble.issues) issues[fieldOf(path, draft)] ??= message;
-		return { bill: null, issues };
+		return null;
 	}
+}
+
+/** The schema stops at a field that is missing; sizes beside it are read all the same. */
+function lengthIssues(draft: BillDraft, read: ReadLength): Record<string, string> {
+	const issues: Record<string, string> = {};
+	const check = (field: string, typed: string) => {
+		const length = read(typed);
+		if (typed.trim() !== '' && !length.ok) issues[field] = length.reason;
+	};
+	draft.measures.forEach(({ value }, index) => check(`measures.${index}.value`, value));
+	/** Beside a measure that can't be read its formulas can't either, and that is said once. */
+	if (Object.keys(issues).length > 0) return issues;
+	draft.pieces.forEach(({ w, h }, index) => {
+		check(`pieces.${index}.w`, w);
+		check(`pieces.${index}.h`, h);
+	});
+	return issues;
 }
 
 function measureIssues({ measures }: BillDraft): Record<string, string> {
@@ -77,23 +97,31 @@ function fieldOf(path: string, { measures }: BillDraft): string {
 	return `measures.${measures.findLastIndex((row) => row.name.trim() === name)}.value`;
 }
 
-function sketchesOf(draft: BillDraft, units: Units): (Sketch | null)[] {
+type ReadLength = (
+	typed: string,
+	zero?: boolean
+) => { readonly ok: true; readonly value: Length } | { readonly ok: false; readonly reason: string };
+
+/** Reads a length or a formula over those of the draft's measures that can be read, each over the ones above it. */
+function lengthReader(draft: BillDraft, units: Units): ReadLength {
 	const measures = new Map<string, Length>();
-	const read = (typed: string, zero = false): Length | null => {
+	const read: ReadLength = (typed, zero = false) => {
 		const text = typed.trimStart();
-		const found = text.startsWith('=')
-			? workOut(text.slice(1), measures, units)
-			: parseLength(text, { unit: units, zero });
-		return found.ok ? found.value : null;
+		if (text.startsWith('=')) return workOut(text.slice(1), measures, units);
+		return parseLength(text, { unit: units, zero });
 	};
 	for (const { name, value } of draft.measures) {
 		const length = read(value);
-		if (length !== null) measures.set(name.trim(), length);
+		if (length.ok) measures.set(name.trim(), length.value);
 	}
-	return draft.pieces.map((piece) => sketch(piece, read));
+	return read;
 }
 
-function sketch(piece: PieceDraft, read: (typed: string, zero?: boolean) => Length | null): Sketch | null {
+function sketch(piece: PieceDraft, reader: ReadLength): Sketch | null {
+	const read = (typed: string, zero = false) => {
+		const length = reader(typed, zero);
+		return length.ok ? length.value : null;
+	};
 	const [w, h] = [read(piece.w), read(piece.h)];
 	if (w === null || h === null || Math.max(w, h) > 400 * Math.min(w, h)) return null;
 	return {

@@ -43,9 +43,9 @@ export class BillEditor {
 		return this.strict || this.left.has(path) ? this.told.issues[path] : undefined;
 	}
 
-	/** Whether something in this part is refused, or was just added without a script. */
-	calls(path: string): boolean {
-		const within = (field: string) => field.startsWith(`${path}.`);
+	/** Whether something in these parts of a line is refused, or was just added without a script. */
+	calls(path: string, parts: readonly string[]): boolean {
+		const within = (field: string) => parts.some((part) => `${field}.`.startsWith(`${path}.${part}.`));
 		if (this.focus !== null && within(this.focus)) return true;
 		return Object.keys(this.told.issues).some((field) => within(field) && this.issue(field) !== undefined);
 	}
