@@ -116,4 +116,5 @@ function consumable(bill: BillDocument, line: string) {
 	return lines?.find((need) => need.key === key);
 }
 
-const inSentence = (kind: string) => kindWords(kind).toLowerCase();
+/** A kind inside a sentence: `corner punch`. */
+export const inSentence = (kind: string) => kindWords(kind).toLowerCase();

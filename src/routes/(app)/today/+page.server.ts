@@ -1,10 +1,11 @@
 import { page } from '$lib/server/answer';
+import { today as dayNow } from '$lib/server/clock';
 import { reader, write } from '$lib/server/db/client';
 import { namesOfSupplies, papersOfPlan } from '$lib/server/queries/papers';
 import { listProjects } from '$lib/server/queries/projects';
 import { getRoom } from '$lib/server/queries/rooms';
 import { suppliesByKind } from '$lib/server/queries/supplies';
-import { todayFor } from '$lib/server/queries/today';
+import { todayFor, unlocksFor } from '$lib/server/queries/today';
 import { reorderProjects } from '$lib/server/services/projects';
 import { requireActor } from '$lib/server/session';
 import { error, fail, redirect } from '@sveltejs/kit';
@@ -17,13 +18,14 @@ export const load: PageServerLoad = page(async (event) => {
 	event.depends('paperlarder:today');
 	const { searchParams } = event.url;
 	const mode = searchParams.get('mode') === 'queue' ? 'queue' : 'each';
-	const on = new Date().toISOString().slice(0, 10);
+	const on = dayNow();
 	const [room, today, kinds] = await Promise.all([
 		getRoom(reader, actor),
 		todayFor(reader, actor, { mode, on }),
 		suppliesByKind(reader, actor)
 	]);
 	const lifted = today.rows.find(({ project }) => project.key === searchParams.get('lift'));
+	const lacking = today.rows.some(({ result }) => result.verdict === 'short');
 	return {
 		mode,
 		on,
@@ -36,6 +38,8 @@ export const load: PageServerLoad = page(async (event) => {
 			papers: await papersOfPlan(reader, actor, lifted.result),
 			names: await namesOfSupplies(reader, actor, lifted.result)
 		},
+		/** Streamed: it takes longer than the ranking. */
+		unlocks: lacking ? unlocksFor(reader, actor, on).catch(() => []) : null,
 		keep: room.keepOffcut,
 		setUp: room.setUp,
 		stocked: kinds.length > 0,
