@@ -10,7 +10,7 @@
 import { ACROSS, DOWN, along, leaf, type Box } from './box';
 import { planOf } from './layout';
 import { Meter } from './meter';
-import { modelOf, type Model } from './model';
+import { modelOf, refuseNonsense, type Model } from './model';
 import type { CutBudget, CutPlan, CutProblem } from './problem';
 
 export interface BestOfSheet {
@@ -32,6 +32,7 @@ interface Part {
 
 /** Cuts the pieces worth most, `values[i]` for each of piece `i`, from one sheet of the first kind. */
 export function bestOfSheet(problem: CutProblem, values: readonly number[], budget: CutBudget): BestOfSheet {
+	refuseNonsense(problem);
 	const [sheet] = problem.sheets;
 	if (!sheet) throw new RangeError('there is no sheet to cut from');
 	const distinct = { ...problem, sheets: [{ ...sheet, count: 1 }] };

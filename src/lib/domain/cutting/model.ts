@@ -37,9 +37,7 @@ export interface Model {
 	readonly scale: number;
 }
 
-/** Throws RangeError where sizes are not positive, counts or costs are negative or a number isn't whole. */
 export function modelOf(problem: CutProblem): Model {
-	refuseNonsense(problem);
 	const pieces = mergedPieces(problem);
 	const total = pieces.reduce((sum, piece) => sum + piece.qty, 0);
 	const second = Math.max(0, ...problem.sheets.map((sheet) => sheet.cost[1]));
@@ -71,7 +69,8 @@ export function splitCost(model: Model, cost: number): [number, number] {
 	return [first, cost - first * model.scale];
 }
 
-function refuseNonsense(problem: CutProblem): void {
+/** Throws RangeError where sizes are not positive, counts or costs are negative or a number isn't whole. */
+export function refuseNonsense(problem: CutProblem): void {
 	const whole = (value: number, least: number) => Number.isSafeInteger(value) && value >= least;
 	const sound =
 		whole(problem.kerf, 0) &&

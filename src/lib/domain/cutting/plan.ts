@@ -11,7 +11,7 @@ import { Patterns } from './exact';
 import { planByKnife } from './knife-plan';
 import { carveSheet, planOf, type Opened } from './layout';
 import { Meter } from './meter';
-import { modelOf, splitCost, type Model } from './model';
+import { modelOf, refuseNonsense, splitCost, type Model } from './model';
 import type { CutAnswer, CutBudget, CutProblem } from './problem';
 import { seeded } from './random';
 import { construct } from './construct';
@@ -19,6 +19,7 @@ import { areaIn } from './box';
 import { Inserter, type State } from './insert';
 import { polish } from './polish';
 import { improve } from './recreate';
+import { largestUnit, measuredBack, measuredIn } from './unit';
 
 /** Units of work for which one side goes on before the other has its turn. */
 const TURN = 20_000;
@@ -38,14 +39,18 @@ export function planAny(problem: CutProblem, budget: CutBudget): CutAnswer {
 	return answerTo(problem, budget, true);
 }
 
-function answerTo(problem: CutProblem, budget: CutBudget, any: boolean): CutAnswer {
+function answerTo(asked: CutProblem, budget: CutBudget, any: boolean): CutAnswer {
+	refuseNonsense(asked);
+	const unit = largestUnit(asked);
+	const problem = measuredIn(asked, unit);
 	const model = modelOf(problem);
 	if (model.total === 0)
 		return { status: 'planned', plan: { sheets: [], cost: NOTHING }, minimum: true, bound: NOTHING };
 	const search = new Search(problem, model, budget, any);
 	search.run();
-	const answer = search.answer();
-	return problem.interlocked ? planByKnife(problem, model, answer, budget) : answer;
+	const byTrimmer = search.answer();
+	const answer = problem.interlocked ? planByKnife(problem, model, byTrimmer, budget) : byTrimmer;
+	return answer.status === 'planned' ? { ...answer, plan: measuredBack(answer.plan, unit) } : answer;
 }
 
 class Search {
