@@ -29,7 +29,7 @@ export interface TodayRow {
 }
 
 /** What a room's whole ranking may take, and the same again for its unlocks. */
-const BUDGET_MS = 5000;
+const BUDGET_MS = 10_000;
 const rankings = new Reckonings<Today>(32);
 const purchases = new Reckonings<readonly Unlock[]>(32);
 

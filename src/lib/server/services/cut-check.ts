@@ -1,6 +1,4 @@
 import type { Bill, Material, Piece, Slot } from '../../domain/bill/bill';
-import { checkPlan } from '../../domain/cutting';
-import { LIES, type CutPlan, type CutProblem, type PieceKind } from '../../domain/cutting/problem';
 import type { SheetSupply } from '../../domain/stash';
 import type { ShownSheet } from '../../schemas/cutting';
 
@@ -53,65 +51,8 @@ export function checkStanding(
 	return null;
 }
 
-/**
- * Puts the plan to the planner's independent checker, each sheet with what is really owned. A branding strip is
- * a piece like any other there: it has to lie along its edge and come off by the cuts that are listed.
- */
-export function checkGeometry(
-	sheets: readonly ShownSheet[],
-	owned: ReadonlyMap<string, OwnedSheet>
-): string[] {
-	const keys = [...new Set(sheets.map(({ supply }) => supply))];
-	const kinds = keys.map((key) => owned.get(key)!.supply);
-	const pieces = new Map<string, { number: number; kind: PieceKind }>();
-	const pieceOf = (w: number, h: number) => {
-		const known = pieces.get(`${w} ${h}`);
-		const number = known?.number ?? pieces.size;
-		const kind = { w, h, qty: (known?.kind.qty ?? 0) + 1, lies: kinds.map(() => LIES.upright) };
-		pieces.set(`${w} ${h}`, { number, kind });
-		return number;
-	};
-	const laid = sheets.map(({ supply, placements, cuts, offcuts }) => {
-		const strip = stripOf(owned.get(supply)!.supply);
-		const isStrip = (rect: Rectangle) => strip !== null && sameRect(rect, strip);
-		const rects = [...placements, ...(strip ? [strip] : [])];
-		return {
-			sheet: keys.indexOf(supply),
-			placements: rects.map(({ x, y, w, h }) => ({ ...{ x, y, w, h }, piece: pieceOf(w, h), turned: false })),
-			cuts,
-			offcuts: offcuts.filter((offcut) => !isStrip(offcut))
-		};
-	});
-	const problem: CutProblem = {
-		sheets: kinds.map(({ w, h, sheets: count }) => ({ w, h, count, cost: [1, 0] })),
-		pieces: [...pieces.values()].map(({ kind }) => kind),
-		kerf: 0
-	};
-	const plan: CutPlan = { sheets: laid, cost: [laid.length, 0] };
-	return checkPlan(problem, plan);
-}
-
 const STASH = 'The stash has changed since this plan was drawn.';
 const BILL = 'The bill has changed since this plan was drawn.';
-
-interface Rectangle {
-	readonly x: number;
-	readonly y: number;
-	readonly w: number;
-	readonly h: number;
-}
-
-/** The branding strip as it lies on the whole sheet. */
-function stripOf({ w, h, strip }: SheetSupply): Rectangle | null {
-	if (!strip) return null;
-	const { edge, depth } = strip;
-	if (edge === 'top' || edge === 'bottom') return { x: 0, y: edge === 'top' ? 0 : h - depth, w, h: depth };
-	return { x: edge === 'left' ? 0 : w - depth, y: 0, w: depth, h };
-}
-
-function sameRect(a: Rectangle, b: Rectangle): boolean {
-	return a.x === b.x && a.y === b.y && a.w === b.w && a.h === b.h;
-}
 
 /** As large as the bill has it, or smaller by no more than its allowance. */
 function isCutTo(piece: Piece, { w, h, turned }: Placed): boolean {

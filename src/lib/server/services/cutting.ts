@@ -12,7 +12,8 @@ import { listProjects, type ProjectRow } from '../queries/projects';
 import { freeSupplyKeys } from '../queries/stash';
 import type { Actor } from '../session';
 import { supplyOf } from '../supply-row';
-import { checkGeometry, checkStanding, type Cuttable, type OwnedSheet } from './cut-check';
+import { checkStanding, type Cuttable, type OwnedSheet } from './cut-check';
+import { checkGeometry } from './cut-geometry';
 import { perform, type Entry } from './ledger';
 import { createRows, type NewRow } from './supplies';
 
