@@ -140,7 +140,15 @@ function distinct(uses: readonly Use[]): Use[] {
 function copyOf({ sheet, prints }: Use, count: number): Use {
 	const supply: SheetSupply = { ...sheet.supply, key: '', count: 'counted', arrives: null };
 	return {
-		sheet: { ...sheet, supply, count, order: Number.MAX_SAFE_INTEGER, first: 1, sort: -2 - sheet.sort },
+		sheet: {
+			...sheet,
+			supply,
+			count,
+			order: Number.MAX_SAFE_INTEGER,
+			first: 1,
+			sort: -2 - sheet.sort,
+			left: false
+		},
 		prints,
 		ways: BOUGHT
 	};
@@ -181,7 +189,8 @@ function blank(part: Part, { w, h }: Size, prints: readonly Print[], count: numb
 			first: 1,
 			remnant: false,
 			prints,
-			sort: -1
+			sort: -1,
+			left: false
 		},
 		prints,
 		ways: BOUGHT

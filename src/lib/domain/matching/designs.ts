@@ -161,7 +161,7 @@ class DesignSearch {
 			);
 			if (this.isWon()) return;
 		}
-		this.take(layOut(this.parts, sorts, this.costOf, this.bench), chosen, barred, sorts, least);
+		this.take(layOut(this.parts, sorts, this.costOf, this.bench, least), chosen, barred, sorts, least);
 	}
 
 	private take(

@@ -4,7 +4,8 @@ import { isBelow, leastCost, type Sorts } from './least-cost';
 import type { Cuttable, Part } from './parts';
 import type { Print } from './prints';
 import type { Purse } from './purse';
-import { likelyKinds, namedSheets, problemOf, questionOf, type Kind, type Question } from './question';
+import { likelySorts } from './likely';
+import { namedSheets, problemOf, questionOf, type Question } from './question';
 import type { Way } from './serving';
 import type { Sheet } from './shelf';
 import { isSound } from './soundness';
@@ -63,21 +64,23 @@ export function layOut(
 	parts: readonly Part[],
 	sorts: readonly Sorts[],
 	costOf: CostOf,
-	bench: Bench
+	bench: Bench,
+	least: Cost | null = leastCost(parts, sorts, costOf)
 ): Outcome {
-	const least = leastCost(parts, sorts, costOf);
 	if (!least) return { status: 'impossible' };
-	const question = questionOf(parts, sorts, costOf);
-	const likely = likelyKinds(question);
-	const outcome = answered(question, likely, costOf, bench);
-	if (likely.length === question.kinds.length) return outcome;
-	if (outcome.status === 'impossible') return answered(question, question.kinds, costOf, bench);
+	const likely = parts.map((part, p) => likelySorts(part, sorts[p] ?? [], costOf));
+	const all = likely.every((own, p) => own === sorts[p]);
+	const question = questionOf(parts, likely, costOf);
+	const outcome = answered(question, costOf, bench);
+	if (all) return outcome;
+	if (outcome.status === 'impossible') return answered(questionOf(parts, sorts, costOf), costOf, bench);
 	if (outcome.status !== 'planned') return outcome;
 	const { layout } = outcome;
 	return { status: 'planned', layout: { ...layout, bound: least, minimum: !isBelow(least, layout.cost) } };
 }
 
-function answered(question: Question, kinds: readonly Kind[], costOf: CostOf, bench: Bench): Outcome {
+function answered(question: Question, costOf: CostOf, bench: Bench): Outcome {
+	const { kinds } = question;
 	const answer = ask(problemOf(question, kinds, bench.options), bench);
 	if (answer.status !== 'planned') return { status: answer.status };
 	const sheets = namedSheets(question, kinds, answer.plan);

@@ -83,31 +83,6 @@ export function problemOf({ cuts }: Question, kinds: readonly Kind[], options: M
 	};
 }
 
-/**
- * The kinds that a first search needs to look at: of each cost the largest, until there is paper to spare. The
- * fewest sheets are nearly always the largest ones; where they are not, the answer is only not proved by this.
- */
-export function likelyKinds({ kinds, cuts }: Question): readonly Kind[] {
-	if (kinds.length <= FEW) return kinds;
-	const wanted = cuts.reduce((sum, { cut }) => sum + cut.w * cut.h * cut.qty, 0);
-	const chosen = [true, false].flatMap((whole) => {
-		const bySize = kinds.filter(({ cost }) => cost[0] > 0 === whole).sort((a, b) => b.w * b.h - a.w * a.h);
-		let [area, number] = [0, 0];
-		for (const kind of bySize) {
-			if (number >= FEW / 4 && area >= 2 * wanted) break;
-			area += kind.w * kind.h * kind.count;
-			number += 1;
-		}
-		return bySize.slice(0, number);
-	});
-	const everyPiece = cuts.flatMap(
-		(_, c) => chosen.some((kind) => kind.lies[c]) || kinds.find((kind) => kind.lies[c]) || []
-	);
-	return [...new Set([...chosen, ...everyPiece.filter((kind) => kind !== true)])];
-}
-
-const FEW = 16;
-
 /** Rows that are offered alike to every part. */
 function alikeRows(parts: number, sorts: readonly Sorts[]): Iterable<readonly Row[]> {
 	if (parts === 1)

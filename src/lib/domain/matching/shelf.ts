@@ -22,6 +22,8 @@ export interface Sheet {
 	readonly prints: readonly Print[];
 	/** Equal for rows that differ in their names, designs, colours and counts only. */
 	readonly sort: number;
+	/** An offcut of the stash's, or a remnant: not a whole sheet. */
+	readonly left: boolean;
 }
 
 /** The stash, sorted by what is asked of it. */
@@ -68,7 +70,7 @@ export function shelfOf(
 		const name = sortOf(one);
 		const sort = sorts.get(name) ?? sorts.size;
 		sorts.set(name, sort);
-		return { ...one, prints: printsOf(one.supply, classesOf), sort };
+		return { ...one, prints: printsOf(one.supply, classesOf), sort, left: one.remnant || one.supply.offcut };
 	});
 	classifyDesigns(sheets, classes);
 	return { sheets: byKind(sheets), consumables, tools, found: new Map() };

@@ -1,5 +1,4 @@
 import type { Slot } from '../bill/bill';
-import { isLeft } from './costs';
 import type { Offer } from './layout';
 import type { Money } from '../money';
 import type { Terms } from './parts';
@@ -51,7 +50,7 @@ export class Uses {
 	}
 
 	private get prices(): readonly (Money | null)[] {
-		const whole = this.list.filter(({ sheet }) => !isLeft(sheet));
+		const whole = this.list.filter(({ sheet }) => !sheet.left);
 		return whole.map(({ sheet: { supply } }) =>
 			supply.price && supply.price.amount > 0 ? supply.price : null
 		);
