@@ -93,7 +93,7 @@ export function fit(shape: Shape, given: unknown): Tree {
  * an issue's path is a field's name. Measures are an object there, and are made from rows that have a name.
  */
 export function documentOf(draft: BillDraft): Record<string, unknown> {
-	const said = spoken(draft) as Record<string, unknown[]>;
+	const said = (spoken(draft) ?? {}) as Record<string, unknown[]>;
 	const named = draft.measures.filter(({ name }) => name.trim() !== '');
 	return {
 		slots: [],

@@ -1,6 +1,6 @@
 import { readMatchRequest, Unreadable, type Issue } from '../domain/exchange';
-import { matchProjects, unlocks, type Unlock } from '../domain/matching';
-import type { MatchResponse } from '../domain/matching/verdict';
+import { matchProjects, unlocks, whatACutCosts, type Loss, type Unlock } from '../domain/matching';
+import type { MatchResponse, Plan } from '../domain/matching/verdict';
 import { readStash } from '../domain/stash-row';
 
 /**
@@ -13,10 +13,17 @@ export interface MatchQuestion {
 	readonly stash?: string;
 	/** Also asks which purchases would turn projects to *now*; takes as long again. */
 	readonly unlocks?: boolean;
+	/** Asks only what carrying out this plan, for the project of that key, costs the request's other projects. */
+	readonly cut?: { readonly project: string; readonly plan: Plan };
 }
 
 export type MatchReply =
-	| { readonly ok: true; readonly response: MatchResponse; readonly unlocks?: readonly Unlock[] }
+	| {
+			readonly ok: true;
+			readonly response: MatchResponse;
+			readonly unlocks?: readonly Unlock[];
+			readonly losses?: readonly Loss[];
+	  }
 	| { readonly ok: false; readonly issues: readonly Issue[] };
 
 /** About what a millisecond of an ordinary processor does; only the clock ends a slower one sooner. */
@@ -29,6 +36,10 @@ export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => 
 		const supplies = question.stash === undefined ? read.supplies : readStash(question.stash);
 		const request = { ...read, supplies };
 		const budget = () => ({ work: budgetMs * WORK_PER_MS, shouldStop: stopAfter(budgetMs) });
+		if (question.cut) {
+			const losses = whatACutCosts(request, question.cut.project, question.cut.plan, budget());
+			return { ok: true, response: { unit: '1/320 mm', results: [] }, losses };
+		}
 		const response = matchProjects(request, budget());
 		if (!question.unlocks) return { ok: true, response };
 		return { ok: true, response, unlocks: unlocks(request, response, budget()) };

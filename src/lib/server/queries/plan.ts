@@ -1,55 +1,74 @@
-import { writeExact } from '../../domain/length';
+import type { Loss } from '../../domain/matching';
 import type { ProjectResult } from '../../domain/matching/verdict';
+import { writeExact } from '../../domain/length';
 import type { Reader } from '../db/client';
 import { Invalid } from '../errors';
 import { matcher, type Matcher } from '../matcher';
+import { Reckonings } from '../reckonings';
 import type { Actor } from '../session';
-import type { ProjectDetail } from './projects';
-import { getRoom } from './rooms';
+import type { MatchQuestion } from '../../workers/match';
+import { listProjects, type ProjectDetail, type ProjectRow } from './projects';
+import { getRoom, type RoomDetail } from './rooms';
 import { stashText } from './stash';
+
+type Planned = Pick<ProjectDetail, 'id' | 'key' | 'bill' | 'copies'>;
 
 /** One project may take longer than its share of a whole room's ranking. */
 const BUDGET_MS = 8000;
-/** Plans kept, by project and date; each serves until its room changes. */
-const kept = new Map<string, { revision: number; plan: Promise<ProjectResult> }>();
-const MOST_KEPT = 64;
+const plans = new Reckonings<ProjectResult>(64);
+const losses = new Reckonings<readonly Loss[]>(64);
 
 /** What the matcher says of one project alone against the whole stash, on a date (YYYY-MM-DD). */
 export async function planFor(
 	db: Reader,
 	actor: Actor,
-	project: Pick<ProjectDetail, 'id' | 'key' | 'bill' | 'copies'>,
+	project: Planned,
 	on: string,
 	by: Matcher = matcher
 ): Promise<ProjectResult> {
-	const { revision, units, reach, keepOffcut } = await getRoom(db, actor);
-	const name = `${project.id} ${on}`;
-	const known = kept.get(name);
-	if (known?.revision === revision) return known.plan;
+	const room = await getRoom(db, actor);
+	return plans.of(`${project.id} ${on}`, room.revision, async () => {
+		const { response } = await ask(db, actor, room, [project], on, by);
+		return response.results[0]!;
+	});
+}
 
+/** What carrying out a project's plan costs the room's other projects. */
+export async function lossesFor(
+	db: Reader,
+	actor: Actor,
+	project: Planned,
+	on: string,
+	by: Matcher = matcher
+): Promise<readonly Loss[]> {
+	const [room, { plan }] = await Promise.all([getRoom(db, actor), planFor(db, actor, project, on, by)]);
+	if (!plan) return [];
+	return losses.of(`${project.id} ${on}`, room.revision, async () => {
+		const projects = await listProjects(db, actor);
+		const reply = await ask(db, actor, room, projects, on, by, { project: project.key, plan });
+		return reply.losses ?? [];
+	});
+}
+
+async function ask(
+	db: Reader,
+	actor: Actor,
+	{ units, reach }: RoomDetail,
+	projects: readonly Pick<ProjectRow, 'key' | 'bill' | 'copies'>[],
+	on: string,
+	by: Matcher,
+	cut?: MatchQuestion['cut']
+) {
 	const request = {
-		projects: [project.bill],
+		projects: projects.map(({ bill }) => bill),
 		supplies: [],
 		...{ mode: 'each', on, budgetMs: BUDGET_MS },
-		copies: { [project.key]: project.copies },
-		options: {
-			units,
-			reach: reach === null ? null : writeExact(reach, 'mm'),
-			keepOffcut: keepOffcut === null ? null : writeExact(keepOffcut, 'mm')
-		}
+		copies: Object.fromEntries(projects.map(({ key, copies }) => [key, copies])),
+		/** Every offcut is listed, scrap too: the person at the trimmer decides which she keeps. */
+		options: { units, reach: reach === null ? null : writeExact(reach, 'mm'), keepOffcut: null }
 	};
-	const plan = stashText(db, actor)
-		.then((stash) => by.ask({ request, today: on, stash }, BUDGET_MS, 'room'))
-		.then((reply) => {
-			if (reply.ok) return reply.response.results[0]!;
-			throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
-		});
-	const fresh = { revision, plan };
-	kept.set(name, fresh);
-	plan.catch(() => kept.get(name) === fresh && kept.delete(name));
-	for (const [oldest] of kept) {
-		if (kept.size <= MOST_KEPT) break;
-		kept.delete(oldest);
-	}
-	return plan;
+	const stash = await stashText(db, actor);
+	const reply = await by.ask({ request, today: on, stash, ...(cut && { cut }) }, BUDGET_MS, 'room');
+	if (reply.ok) return reply;
+	throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
 }

@@ -9,18 +9,15 @@ import { NotFound } from '$lib/server/errors';
 import { orSay } from '$lib/server/or-say';
 import { doneAct } from '$lib/server/queries/acts';
 import { namesOfSupplies, papersOfPlan } from '$lib/server/queries/papers';
-import { planFor } from '$lib/server/queries/plan';
+import { lossesFor, planFor } from '$lib/server/queries/plan';
 import { listProjects, projectById, type ProjectDetail } from '$lib/server/queries/projects';
 import { getRoom } from '$lib/server/queries/rooms';
-import { stashForMatching } from '$lib/server/queries/stash';
 import { listBins } from '$lib/server/queries/supplies';
-import { todayFor } from '$lib/server/queries/today';
 import { useSheets } from '$lib/server/services/cutting';
 import { requireActor, type Actor } from '$lib/server/session';
 import { soon } from '$lib/server/soon';
 import { fail, redirect, type RequestEvent } from '@sveltejs/kit';
 import { v7 } from 'uuid';
-import { costsOf } from './costs';
 import type { Actions, PageServerLoad } from './$types';
 
 export const load: PageServerLoad = page(async (event) => {
@@ -39,7 +36,7 @@ export const load: PageServerLoad = page(async (event) => {
 		keep: room.keepOffcut,
 		bins: (await listBins(reader, actor)).map(({ name }) => name),
 		match: await soon(matchOf(actor, project, room.units), patient),
-		costs: await soon(costs(actor, project), patient),
+		costs: await soon(lossesFor(reader, actor, project, today()), patient),
 		done: await doneAct(reader, actor, searchParams.get('did')),
 		/** Names the cut, or its undoing: sent twice, it happens once. */
 		request: v7(),
@@ -77,16 +74,4 @@ async function matchOf(actor: Actor, project: ProjectDetail, units: 'in' | 'mm' 
 		/** The bills that its sheets are shared with, by key. */
 		projects: Object.fromEntries((await listProjects(reader, actor)).map(({ key, name }) => [key, name]))
 	};
-}
-
-/** What cutting this plan takes from the room's other projects. */
-async function costs(actor: Actor, project: ProjectDetail) {
-	const [result, { rows }, stash] = await Promise.all([
-		planFor(reader, actor, project, today()),
-		todayFor(reader, actor, { mode: 'each', on: today() }),
-		stashForMatching(reader, actor)
-	]);
-	const others = rows.filter((row) => row.project.id !== project.id);
-	const owned = stash.map((row) => [row.key, row.group === 'sheet' ? row.sheets : 0] as const);
-	return costsOf(result, others, new Map(owned));
 }
