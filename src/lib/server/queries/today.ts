@@ -46,19 +46,6 @@ export async function todayFor(
 	);
 }
 
-/** What the matcher says of one project. @throws {NotFound} */
-export async function todayForProject(
-	db: Reader,
-	actor: Actor,
-	projectId: string,
-	asking: Asking
-): Promise<TodayRow> {
-	const { rows } = await todayFor(db, actor, asking);
-	const row = rows.find(({ project }) => project.id === projectId);
-	if (!row) throw new NotFound();
-	return row;
-}
-
 /**
  * What can be bought, and the projects by key that each purchase alone turns to *now*; most first. It tries every
  * missing thing, so it takes longer than the ranking: a page shows that first and streams this after it.
