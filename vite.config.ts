@@ -37,7 +37,9 @@ const app = defineConfig({
 				test: {
 					name: 'built',
 					include: ['tests/security/**/*.test.ts'],
-					globalSetup: 'tests/setup/server.ts'
+					globalSetup: 'tests/setup/server.ts',
+					hookTimeout: 120_000,
+					testTimeout: 120_000
 				}
 			}
 		]
