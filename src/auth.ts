@@ -116,12 +116,16 @@ async function letIn(event: RequestEvent, whoIsIt: () => Promise<string | null>)
 
 /**
  * Runs one of Auth.js's form actions with a form and headers of our own making, so that nothing the client
- * sends reaches it but its cookie, and only the session cookie comes back.
+ * sends reaches it but its cookie and its name, and only the session cookie comes back.
  */
 async function runAction(event: RequestEvent, action: Action, form: Record<string, string>): Promise<void> {
 	const request = new Request(env.ORIGIN, {
 		method: 'POST',
-		headers: { host: new URL(env.ORIGIN).host, cookie: event.request.headers.get('cookie') ?? '' },
+		headers: {
+			host: new URL(env.ORIGIN).host,
+			cookie: event.request.headers.get('cookie') ?? '',
+			'user-agent': event.request.headers.get('user-agent') ?? ''
+		},
 		body: new URLSearchParams(form)
 	});
 	const cookies = {

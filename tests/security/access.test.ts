@@ -25,7 +25,7 @@ beforeAll(async () => {
 	db = await openServersDatabase();
 	await mkdir(join(inject('server').folder, 'photos'), { recursive: true });
 	await writeFile(join(inject('server').folder, 'photos', 'matrix.webp'), 'RIFF');
-	built = (await builtRoutes()).flatMap(({ id, page, methods, actions }) => [
+	built = builtRoutes().flatMap(({ id, page, methods, actions }) => [
 		...(page ? [{ key: `GET ${id}`, id }] : []),
 		...methods.map((method) => ({ key: `${method} ${id}`, id })),
 		...actions.map((name) => ({ key: `POST ${id}?/${name}`, id }))

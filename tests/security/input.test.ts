@@ -35,8 +35,7 @@ describe('markup in any text (ASVS 1.2.1)', () => {
 		const supplyDocument = cardstock({
 			name: HOSTILE,
 			collection: HOSTILE,
-			bin: HOSTILE.slice(0, 60),
-			notes: HOSTILE
+			bin: HOSTILE.slice(0, 60)
 		} as never);
 		const added = await browser.send('POST', `${own}/supplies`, { id: supply, supply: supplyDocument });
 		expect(added.status, added.text).toBe(201);
@@ -66,7 +65,7 @@ describe('addresses that would run (ASVS 1.2.2)', () => {
 	it('are plain text wherever text is taken', async () => {
 		const { browser, roomId } = await signedIn(db);
 		for (const name of ['javascript:alert(1)', 'data:text/html,<script>1</script>', 'vbscript:x']) {
-			const supply = cardstock({ name, notes: name } as never);
+			const supply = cardstock({ name, collection: name });
 			const answer = await browser.send('POST', `/api/rooms/${roomId}/supplies`, { id: v7(), supply });
 			expect(answer.status, answer.text).toBe(201);
 		}

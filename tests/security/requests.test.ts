@@ -13,7 +13,7 @@ let routes: BuiltRoute[];
 beforeAll(async () => {
 	db = await openServersDatabase();
 	owner = await signedIn(db);
-	routes = await builtRoutes();
+	routes = builtRoutes();
 });
 afterAll(() => db.close());
 

@@ -1,5 +1,4 @@
-import { resolve } from 'node:path';
-import { pathToFileURL } from 'node:url';
+import { execFileSync } from 'node:child_process';
 
 export interface BuiltRoute {
 	/** As Kit names it: `/(app)/projects/[id]`. */
@@ -11,35 +10,10 @@ export interface BuiltRoute {
 	readonly actions: readonly string[];
 }
 
-interface Manifest {
-	readonly _: {
-		readonly routes: readonly {
-			readonly id: string;
-			readonly page: { readonly leaf: number } | null;
-			readonly endpoint: (() => Promise<Record<string, unknown>>) | null;
-		}[];
-		readonly nodes: readonly (() => Promise<{ server?: { actions?: Record<string, unknown> } }>)[];
-	};
-}
-
-const METHODS = ['GET', 'HEAD', 'POST', 'PUT', 'PATCH', 'DELETE', 'OPTIONS'];
-
-/** Every route that the build answers, from its own manifest. */
-export async function builtRoutes(): Promise<BuiltRoute[]> {
-	const path = pathToFileURL(resolve('.svelte-kit/output/server/manifest-full.js')).href;
-	const { manifest } = (await import(/* @vite-ignore */ path)) as { manifest: Manifest };
-	return Promise.all(
-		manifest._.routes.map(async ({ id, page, endpoint }) => {
-			const handlers = endpoint ? await endpoint() : {};
-			const node = page ? await manifest._.nodes[page.leaf]?.() : undefined;
-			return {
-				id,
-				page: page !== null,
-				methods: METHODS.filter((method) => method in handlers),
-				actions: Object.keys(node?.server?.actions ?? {})
-			};
-		})
-	);
+/** Every route that the build answers. */
+export function builtRoutes(): BuiltRoute[] {
+	const listed = execFileSync(process.execPath, ['tests/setup/list-routes.mjs'], { encoding: 'utf8' });
+	return JSON.parse(listed) as BuiltRoute[];
 }
 
 /** The path of a route, its parameters filled in. */

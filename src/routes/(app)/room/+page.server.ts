@@ -103,7 +103,7 @@ export const actions: Actions = {
 		return orSay(async () => {
 			await write((tx) => removePerson(tx, actor, actor.userId));
 			audit(event, 'room.left', { room: actor.roomId });
-			redirect(303, '/room/new');
+			redirect(303, '/account');
 		});
 	}),
 
