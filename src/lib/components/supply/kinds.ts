@@ -2,13 +2,13 @@ import { SHEET_KINDS, SUPPLY_MEASURES, TOOL_KINDS } from '$lib/domain/stash';
 import type { ConsumableKind, SupplyKind } from '$lib/domain/stash';
 
 export type Group = 'sheet' | 'consumable' | 'tool';
-export type Measure = 'length' | 'volume' | 'count';
+type Measure = 'length' | 'volume' | 'count';
 export type FamilyKey =
 	| ('paper' | 'fancy' | 'board' | 'tape' | 'glue' | 'fasten' | 'trim')
 	| ('cut' | 'measure' | 'score' | 'punch' | 'die' | 'finish');
 
 /** Kinds that lie together in a drawer, so that one is found without knowing its name. */
-export interface Family {
+interface Family {
 	readonly key: FamilyKey;
 	readonly label: string;
 	readonly group: Group;
