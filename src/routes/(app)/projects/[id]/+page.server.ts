@@ -76,22 +76,18 @@ export const actions: Actions = {
 };
 
 /** A choice is posted as `[design, collection]`, or blank for whatever serves. */
-const choiceSchema = z
-	.object({
-		slot: z.string(),
-		paper: z.preprocess(
-			(text) => (typeof text === 'string' && text.startsWith('[') ? parsed(text) : [null, null]),
-			z.tuple([z.string().nullable(), z.string().nullable()])
-		)
-	})
-	.transform(({ slot, paper: [design, collection] }) => ({ slot, design, collection }))
-	.pipe(chooseDesignSchema);
+const choiceSchema = z.preprocess((fields) => {
+	const { slot, paper } = fields as { slot: unknown; paper: unknown };
+	const [design, collection] = typeof paper === 'string' && paper !== '' ? parsed(paper) : [null, null];
+	return { slot, design, collection };
+}, chooseDesignSchema);
 
-function parsed(text: string): unknown {
+function parsed(text: string): unknown[] {
 	try {
-		return JSON.parse(text);
+		const pair: unknown = JSON.parse(text);
+		return Array.isArray(pair) ? pair : [];
 	} catch {
-		return undefined;
+		return [];
 	}
 }
 
