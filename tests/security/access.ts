@@ -63,6 +63,7 @@ export const ACCESS: Readonly<Record<string, Access>> = {
 	'GET /api/rooms/[room]/supplies/[id]': 'viewer',
 	'GET /api/rooms/[room]/today': 'viewer',
 	'GET /api/rooms/[room]/trash': 'viewer',
+	'GET /api/rooms/[room]/unlocks': 'viewer',
 	'POST /api/rooms/[room]/match': 'viewer',
 
 	'POST /(app)/today?/move': 'member',

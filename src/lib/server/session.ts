@@ -41,8 +41,3 @@ export async function requireActor(event: Signed, atLeast: RoomRole, roomId?: st
 		seesPrices: membership.role !== 'viewer' || membership.pricesShown
 	};
 }
-
-/** @throws {Unauthenticated | Forbidden} */
-export function requireAdmin(event: Signed): void {
-	if (requireUser(event).siteRole !== 'admin') throw new Forbidden();
-}
