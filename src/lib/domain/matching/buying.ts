@@ -2,6 +2,7 @@ import { INCH, MILLIMETRE, type Length } from '../length';
 import { LIES } from '../cutting/problem';
 import type { SheetSupply } from '../stash';
 import type { Seat } from './components';
+import { DEEPEST } from './design-classes';
 import { chooseDesigns } from './designs';
 import type { Bench, CostOf } from './layout';
 import { lieUnder, roomFor } from './lies';
@@ -34,9 +35,11 @@ export function sheetsToBuy(
 	const bought = new Map<Sheet, boolean>();
 	const at = seats.map((seat) => {
 		if (seat.part.slot !== lacking.slot || seat.part.project !== lacking.project) return seatOn(seat, terms);
-		const more = moreFor(seat, bench.options);
+		const designs = seat.part.single ? modelsOf(seat.uses.list, seats) : null;
+		const owned = designs ? shownBy(seat.uses.list, designs) : seat.uses.list;
+		const more = moreFor(seat.part, designs ?? [{ prints: null, uses: owned }], bench.options);
 		for (const { use, custom } of more) bought.set(use.sheet, custom);
-		return seatOn({ ...seat, uses: new Uses([...seat.uses.list, ...more.map(({ use }) => use)]) }, terms);
+		return seatOn({ ...seat, uses: new Uses([...owned, ...more.map(({ use }) => use)]) }, terms);
 	});
 	const costOf: CostOf = (sheet) => (bought.has(sheet) ? [1, 0] : [0, 1]);
 	const choice = chooseDesigns(at, costOf, bench);
@@ -57,10 +60,9 @@ interface More {
 	readonly custom: boolean;
 }
 
-/** What could be bought for a seat: for every design that it may show, or for one nobody owns yet. */
-function moreFor({ part, uses }: Seat, options: MatchOptions): More[] {
+/** What could be bought for a part: for every design that it may show, or for one nobody owns yet. */
+function moreFor(part: Part, designs: readonly Design[], options: MatchOptions): More[] {
 	const total = part.pieces.reduce((sum, { qty }) => sum + qty, 0);
-	const designs = part.single ? designsOf(uses.list) : [{ prints: null, uses: uses.list }];
 	const kinds = designs.length > 0 ? designs : [{ prints: null, uses: [] }];
 	return kinds.flatMap(({ prints, uses: own }) => {
 		const asked = own.filter(({ ways }) => ways.some(({ material }) => material < 0));
@@ -90,18 +92,47 @@ interface Size {
 	readonly h: Length;
 }
 
-/** Every design with the rows that show it, in the stash's order. */
-function designsOf(uses: readonly Use[]): { prints: Print[]; uses: Use[] }[] {
-	const designs = new Map<string, { prints: Print[]; uses: Use[] }>();
+interface Design {
+	readonly prints: readonly Print[] | null;
+	readonly uses: readonly Use[];
+}
+
+/**
+ * Designs with the rows that show them, in the stash's order: of a class that is alike in all that counts no more
+ * than could be shown at once, and whatever some slot asks for by name.
+ */
+function modelsOf(uses: readonly Use[], seats: readonly Seat[]): Design[] {
+	const groups = new Set(seats.flatMap(({ part }) => (part.single ? [part.group] : []))).size;
+	const depth = Math.min(DEEPEST, Math.max(0, groups - 1));
+	const chosen = new Set(seats.map(({ part }) => part.slot.design));
+	const seen = new Map<number, number>();
+	const designs = new Map<string, { prints: Print[]; uses: Use[] } | null>();
 	for (const use of uses) {
 		for (const print of use.prints) {
-			const known = designs.get(print.design) ?? { prints: [], uses: [] };
+			let known = designs.get(print.design);
+			if (known === undefined) {
+				const number = print.classes[depth] ?? -1;
+				const alike = seen.get(number) ?? 0;
+				seen.set(number, alike + 1);
+				known = alike < groups || chosen.has(print.name) ? { prints: [], uses: [] } : null;
+				designs.set(print.design, known);
+			}
+			if (!known) continue;
 			if (!known.prints.some(({ bound }) => bound === print.bound)) known.prints.push(print);
-			if (!known.uses.includes(use)) known.uses.push(use);
-			designs.set(print.design, known);
+			if (known.uses.at(-1) !== use) known.uses.push(use);
 		}
 	}
-	return [...designs.values()];
+	return [...designs.values()].filter((design) => design !== null);
+}
+
+/** The rows that show one of the designs, with no other face. */
+function shownBy(uses: readonly Use[], designs: readonly Design[]): Use[] {
+	const shown = new Set(designs.flatMap(({ prints }) => (prints ?? []).map(({ design }) => design)));
+	return uses.flatMap((use) => {
+		const prints = use.prints.filter(({ design }) => shown.has(design));
+		if (prints.length === 0) return [];
+		return [prints.length === use.prints.length ? use : { ...use, prints }];
+	});
 }
 
 /** The size on which most of the pieces can be cut at all; the first in the stash's order among equals. */

@@ -3,7 +3,7 @@ import type { Cost, CostOf, Offer } from './layout';
 import { isBelow, leastCost } from './least-cost';
 import type { Part } from './parts';
 import type { Sheet } from './shelf';
-import type { Offers } from './uses';
+import type { Extent, Offers } from './uses';
 
 /** Slots that show one design together. */
 export interface Group {
@@ -35,6 +35,8 @@ export class Candidates {
 	private readonly offers: readonly Offers[];
 	private readonly known = new Map<string, Candidate | null>();
 	private readonly area: number;
+	/** By part, the least extent that a design must have. */
+	private readonly needs: readonly Extent[];
 	private ranked: readonly { readonly designs: readonly string[]; readonly first: Candidate }[] | null = null;
 
 	/**
@@ -51,10 +53,12 @@ export class Candidates {
 	) {
 		this.parts = group.seats.flatMap((seat) => parts[seat] ?? []);
 		this.offers = group.seats.flatMap((seat) => offers[seat] ?? []);
-		this.area = this.parts.reduce(
-			(sum, { pieces }) => sum + pieces.reduce((all, { w, h, qty }) => all + w * h * qty, 0),
-			0
-		);
+		this.needs = this.parts.map(({ pieces }) => ({
+			area: pieces.reduce((all, { w, h, qty }) => all + w * h * qty, 0),
+			short: Math.max(0, ...pieces.map(({ w, h }) => Math.min(w, h))),
+			long: Math.max(0, ...pieces.map(({ w, h }) => Math.max(w, h)))
+		}));
+		this.area = this.needs.reduce((sum, { area }) => sum + area, 0);
 		const classes = this.offers[0]?.classes(depth) ?? [];
 		const named = chosen.size === 0 ? classes : classes.flatMap((designs) => this.apart(designs, chosen));
 		const wished = this.parts.some(({ slot }) => slot.colour !== null);
@@ -71,6 +75,7 @@ export class Candidates {
 	}
 
 	of(design: string): Candidate | null {
+		if (!this.hasRoom(design)) return null;
 		const known = this.known.get(design);
 		if (known !== undefined) return known;
 		const offers = this.offers.map(({ designs }) => designs.get(design) ?? []);
@@ -80,6 +85,13 @@ export class Candidates {
 		const candidate = least && { design, offers, sheets, least, tight: this.area > ROOMY * paperOf(sheets) };
 		this.known.set(design, candidate);
 		return candidate;
+	}
+
+	private hasRoom(design: string): boolean {
+		return this.needs.every((need, i) => {
+			const extent = this.offers[i]?.extentOf(design);
+			return extent && extent.area >= need.area && extent.short >= need.short && extent.long >= need.long;
+		});
 	}
 
 	/**

@@ -68,7 +68,7 @@ export function layOut(
 	least: Cost | null = leastCost(parts, sorts, costOf)
 ): Outcome {
 	if (!least) return { status: 'impossible' };
-	const likely = parts.map((part, p) => likelySorts(part, sorts[p] ?? [], costOf));
+	const likely = parts.map((part, p) => likelySorts(part, sorts[p] ?? []));
 	const all = likely.every((own, p) => own === sorts[p]);
 	const question = questionOf(parts, likely, costOf);
 	const outcome = answered(question, costOf, bench);

@@ -12,9 +12,10 @@ export type Sorts = readonly (readonly Offer[])[];
  * piece fits nowhere or there is less paper than pieces, so that there is no layout at all.
  */
 export function leastCost(parts: readonly Part[], sorts: readonly Sorts[], costOf: CostOf): Cost | null {
-	const tally = new Tally(parts.length > 1);
-	for (const [p, part] of parts.entries()) {
-		if (!tally.add(part, sorts[p] ?? [], costOf)) return null;
+	const tally = new Tally(parts.length > 1 && sorts.some((own) => own !== sorts[0]));
+	for (let p = 0; p < parts.length; p++) {
+		const part = parts[p];
+		if (part && !tally.add(part, sorts[p] ?? [], costOf)) return null;
 	}
 	return tally.least();
 }
@@ -27,11 +28,12 @@ class Tally {
 	private cheapest = Infinity;
 	private needsWhole = false;
 	private readonly lefts: { size: number; count: number }[] = [];
+	private readonly piled = new Set<readonly Offer[]>();
 	private readonly seen: Set<Sheet> | null;
 
-	/** Rows need telling apart only where several parts may share them. */
-	constructor(shared: boolean) {
-		this.seen = shared ? new Set() : null;
+	/** `mixed`: several parts draw on different sorts, which may hold the same rows. */
+	constructor(mixed: boolean) {
+		this.seen = mixed ? new Set() : null;
 	}
 
 	/** False where one of the part's pieces fits nowhere. */
@@ -61,6 +63,8 @@ class Tally {
 	}
 
 	private pile(offers: readonly Offer[], cost: number): void {
+		if (this.piled.has(offers)) return;
+		this.piled.add(offers);
 		for (const { sheet } of offers) {
 			if (this.seen?.has(sheet)) continue;
 			this.seen?.add(sheet);

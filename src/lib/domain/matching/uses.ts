@@ -1,5 +1,6 @@
 import type { Slot } from '../bill/bill';
 import type { Offer } from './layout';
+import type { Length } from '../length';
 import type { Money } from '../money';
 import type { Terms } from './parts';
 import { usesFor, wayOn, type Use } from './serving';
@@ -72,10 +73,18 @@ function isSame(a: readonly Offer[], b: readonly Offer[]): boolean {
 	);
 }
 
+/** All the paper there is of something, and the longest short and long side of it. */
+export interface Extent {
+	readonly area: number;
+	readonly short: Length;
+	readonly long: Length;
+}
+
 /** What is offered to a slot on some terms: in the stash's order, by sort of row, by design, and by class of design. */
 export class Offers {
 	private sorted: readonly (readonly Offer[])[] | null = null;
 	private designed: ReadonlyMap<string, readonly Offer[]> | null = null;
+	private readonly extents = new Map<string, Extent>();
 	private readonly classed = new Map<number, readonly (readonly string[])[]>();
 
 	constructor(
@@ -97,6 +106,21 @@ export class Offers {
 		const made = [...classes.values()];
 		this.classed.set(depth, made);
 		return made;
+	}
+
+	/** What a design's rows come to: whatever doesn't fit this fits none of them. */
+	extentOf(design: string): Extent {
+		const known = this.extents.get(design);
+		if (known) return known;
+		let [area, short, long] = [0, 0, 0];
+		for (const { sheet } of this.designs.get(design) ?? []) {
+			area += sheet.w * sheet.h * sheet.count;
+			short = Math.max(short, Math.min(sheet.w, sheet.h));
+			long = Math.max(long, sheet.w, sheet.h);
+		}
+		const extent = { area, short, long };
+		this.extents.set(design, extent);
+		return extent;
 	}
 
 	/** Offers that are alike for every piece. */
