@@ -1,5 +1,5 @@
 import { invalidate } from '$app/navigation';
-import { createQuery } from '@tanstack/svelte-query';
+import { createQuery, useQueryClient } from '@tanstack/svelte-query';
 import { flapsOf, type TodayFlap } from './flaps';
 
 export interface TodayData {
@@ -17,8 +17,13 @@ export const todayKey = ({ here, mode, on }: Pick<TodayData, 'here' | 'mode' | '
 	on
 ];
 
-/** The flaps as `load` gave them, asked for anew when somebody comes back to the page or moves one. */
+/** The flaps as `load` last gave them, asked for anew when somebody comes back to the page. */
 export function todayQuery(data: () => TodayData) {
+	const queries = useQueryClient();
+	$effect.pre(() => {
+		const loaded = data();
+		queries.setQueryData(todayKey(loaded), [...loaded.flaps]);
+	});
 	return createQuery(() => {
 		const { here, mode, on, revision, flaps } = data();
 		return {
