@@ -29,7 +29,7 @@ export function todayQuery(data: () => TodayData) {
 		return {
 			queryKey: todayKey({ here, mode, on }),
 			queryFn: async ({ signal }) => {
-				const answer = await fetch(`/api/rooms/${here?.id}/today?${new URLSearchParams({ mode, on })}`, {
+				const answer = await fetch(`/api/rooms/${here?.id}/today?mode=${mode}&on=${on}`, {
 					signal
 				});
 				if (!answer.ok) throw new Error(`Today answered ${answer.status}`);
