@@ -2,6 +2,7 @@ import type { Done } from '$lib/server/queries/acts';
 
 /** The notice's sentence for what was done. */
 export function doneWords({ kind, rows, name }: Done): string {
+	if (rows === 0 && kind !== 'undo') return 'That changed nothing: it was so already.';
 	const what = rows === 1 && name ? name : `${rows} rows`;
 	const are = rows === 1 ? 'is' : 'are';
 	switch (kind) {
@@ -28,4 +29,5 @@ export function doneWords({ kind, rows, name }: Done): string {
 	}
 }
 
-export const canUndo = ({ kind, undone }: Done) => !undone && kind !== 'undo' && kind !== 'import';
+export const canUndo = ({ kind, rows, undone }: Done) =>
+	rows > 0 && !undone && kind !== 'undo' && kind !== 'import';
