@@ -79,7 +79,7 @@ export const actions: Actions = {
 		return orSay(async () => {
 			await write((tx) => undo(tx, actor, input.data));
 			const back = new URL(returnPath(String(fields.get('back') ?? ''), '/supplies'), event.url);
-			redirect(303, addressWith(back, { did: input.data.id }));
+			redirect(303, addressWith(back, { did: input.data.id, page: back.searchParams.get('page') }));
 		});
 	})
 };

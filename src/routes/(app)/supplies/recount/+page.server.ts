@@ -1,5 +1,7 @@
 import { listed } from '$lib/components/supply/listed';
 import { measureOf } from '$lib/components/supply/kinds';
+import { addressWith } from '$lib/components/supply/address';
+import { returnPath } from '$lib/return-path';
 import { amountTyped } from '$lib/schemas/stock-form';
 import { recountSchema } from '$lib/schemas/supplies';
 import { page } from '$lib/server/answer';
@@ -21,6 +23,7 @@ export const load: PageServerLoad = page(async (event) => {
 	const rows = await storedSupplies(reader, actor, ids);
 	return {
 		rows: rows.map((row) => ({ ...listed(row, ''), left: leftTyped(row) })),
+		back: returnPath(event.url.searchParams.get('back'), '/supplies'),
 		request: v7()
 	};
 });
@@ -52,7 +55,8 @@ export const actions: Actions = {
 			if (refusal instanceof Conflict) return refuse([{ path: ['counts', 0], message: refusal.message }]);
 			throw refusal;
 		}
-		redirect(303, `/supplies?did=${input.data.id}`);
+		const back = new URL(returnPath(String(fields.get('back') ?? ''), '/supplies'), event.url);
+		redirect(303, addressWith(back, { did: input.data.id, page: back.searchParams.get('page') }));
 	})
 };
 
