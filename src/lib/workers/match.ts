@@ -27,7 +27,7 @@ export type MatchReply =
 	| { readonly ok: false; readonly issues: readonly Issue[] };
 
 /** About what a millisecond of an ordinary processor does; only the clock ends a slower one sooner. */
-const WORK_PER_MS = 20_000;
+const WORK_PER_MS = 10_000;
 
 /** The one entry point of every host. `stopAfter` starts a clock and says when so many milliseconds are over. */
 export function answerMatch(question: MatchQuestion, stopAfter: (ms: number) => () => boolean): MatchReply {

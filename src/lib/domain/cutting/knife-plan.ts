@@ -8,18 +8,12 @@ import { inequalitiesOf } from './bounds';
 import { Combinations } from './combinations';
 import { interlock, type KnifeSheet } from './interlocked';
 import { drawer } from './layout';
-import { Meter } from './meter';
+import type { Meter } from './meter';
 import { splitCost, type Model } from './model';
-import type { CutAnswer, CutBudget, CutPlan, CutProblem, CutSheet, Rect } from './problem';
+import type { CutFound, CutPlan, CutProblem, CutSheet, Rect } from './problem';
 
 /** Betters `byTrimmer`, the best edge-to-edge answer, where the knife can. */
-export function planByKnife(
-	problem: CutProblem,
-	model: Model,
-	byTrimmer: CutAnswer,
-	budget: CutBudget
-): CutAnswer {
-	const meter = new Meter(budget);
+export function planByKnife(problem: CutProblem, model: Model, byTrimmer: CutFound, meter: Meter): CutFound {
 	const combinations = new Combinations(model, inequalitiesOf(model, false), meter);
 	const known =
 		byTrimmer.status === 'planned' ? byTrimmer.plan.cost[0] * model.scale + byTrimmer.plan.cost[1] : Infinity;

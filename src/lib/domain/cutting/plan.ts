@@ -12,7 +12,7 @@ import { planByKnife } from './knife-plan';
 import { carveSheet, planOf, type Opened } from './layout';
 import { Meter } from './meter';
 import { modelOf, refuseNonsense, splitCost, type Model } from './model';
-import type { CutAnswer, CutBudget, CutProblem } from './problem';
+import type { CutAnswer, CutBudget, CutFound, CutProblem } from './problem';
 import { seeded } from './random';
 import { construct } from './construct';
 import { areaIn } from './box';
@@ -45,12 +45,16 @@ function answerTo(asked: CutProblem, budget: CutBudget, any: boolean): CutAnswer
 	const problem = measuredIn(asked, unit);
 	const model = modelOf(problem);
 	if (model.total === 0)
-		return { status: 'planned', plan: { sheets: [], cost: NOTHING }, minimum: true, bound: NOTHING };
+		return { status: 'planned', plan: { sheets: [], cost: NOTHING }, minimum: true, bound: NOTHING, work: 0 };
 	const search = new Search(problem, model, budget, any);
 	search.run();
 	const byTrimmer = search.answer();
-	const answer = problem.interlocked ? planByKnife(problem, model, byTrimmer, budget) : byTrimmer;
-	return answer.status === 'planned' ? { ...answer, plan: measuredBack(answer.plan, unit) } : answer;
+	const knife = new Meter(budget);
+	const answer = problem.interlocked ? planByKnife(problem, model, byTrimmer, knife) : byTrimmer;
+	const work = search.spent + knife.spent;
+	return answer.status === 'planned'
+		? { ...answer, plan: measuredBack(answer.plan, unit), work }
+		: { ...answer, work };
 }
 
 class Search {
@@ -104,7 +108,11 @@ class Search {
 		}
 	}
 
-	answer(): CutAnswer {
+	get spent(): number {
+		return this.meter.spent;
+	}
+
+	answer(): CutFound {
 		const bound = splitCost(this.model, Math.min(this.bound, this.best?.cost ?? this.bound));
 		if (this.best) {
 			const plan = planOf(

@@ -92,7 +92,7 @@ export interface CutPlan {
  * - `unknown`: the budget ran out before either.
  * `bound` is a proved lower bound on the first cost (and on the second among plans of least first cost).
  */
-export type CutAnswer =
+export type CutFound =
 	| {
 			readonly status: 'planned';
 			readonly plan: CutPlan;
@@ -101,3 +101,6 @@ export type CutAnswer =
 	  }
 	| { readonly status: 'impossible'; readonly bound: readonly [number, number] }
 	| { readonly status: 'unknown'; readonly bound: readonly [number, number] };
+
+/** `work`: the units that were spent on it. */
+export type CutAnswer = CutFound & { readonly work: number };

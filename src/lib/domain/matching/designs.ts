@@ -40,6 +40,11 @@ function groupsOf(parts: readonly Part[]): Group[] {
 	return [...groups.values()];
 }
 
+/** One call of the planner may spend so much while all choices are looked through once, then that many times it. */
+const FIRST_LOOK = 1_000;
+const DEEPER = 8;
+const NOTHING: Cost = [0, 0];
+
 type Planned = Extract<Choice, { status: 'planned' }>;
 
 class DesignSearch {
@@ -48,7 +53,9 @@ class DesignSearch {
 	private unsettled: Cost | null = null;
 	private floor: Cost = [0, 0];
 	private readonly size: number;
-	private readonly alone = new Map<Candidate, Outcome>();
+	private most = FIRST_LOOK;
+	/** What groups come to by themselves, and how hard that was looked for. */
+	private readonly alone = new Map<Candidate, Outcome & { readonly most: number }>();
 
 	constructor(
 		private readonly parts: readonly Part[],
@@ -63,7 +70,12 @@ class DesignSearch {
 
 	run(): Choice {
 		if (!this.setFloor()) return { status: 'impossible' };
-		this.visit([]);
+		for (this.most = FIRST_LOOK; ; this.most *= DEEPER) {
+			this.unsettled = null;
+			this.visit([], NOTHING);
+			if (this.isWon() || !this.unsettled || this.bench.purse.isSpent) break;
+			if (4 * this.most >= this.bench.purse.left) break;
+		}
 		if (!this.best) return { status: this.unsettled ? 'unknown' : 'impossible' };
 		const { layout } = this.best;
 		const open = this.unsettled;
@@ -89,7 +101,8 @@ class DesignSearch {
 		return joint !== null;
 	}
 
-	private visit(chosen: readonly Candidate[]): void {
+	/** `spent`: what the chosen cost at least. */
+	private visit(chosen: readonly Candidate[], spent: Cost): void {
 		const group = this.groups[chosen.length];
 		if (!group)
 			return this.settle(
@@ -99,10 +112,13 @@ class DesignSearch {
 		for (const { candidate, fresh } of this.options(group, chosen)) {
 			if (this.isWon()) return;
 			if (this.bench.purse.isSpent) return this.leave(this.floor);
-			if (this.cannotWin(candidate.least)) continue;
-			if (fresh && this.groups.length > 1 && this.layAlone(candidate, group).status === 'impossible')
+			const least = fresh ? sumOf([spent, candidate.least]) : larger(spent, candidate.least);
+			if (this.cannotWin(least)) continue;
+			if (fresh && this.groups.length > 1 && this.layAlone(candidate, group).status !== 'planned') {
+				if (this.alone.get(candidate)?.status === 'unknown') this.leave(larger(this.floor, least));
 				continue;
-			this.visit([...chosen, candidate]);
+			}
+			this.visit([...chosen, candidate], least);
 		}
 	}
 
@@ -132,11 +148,11 @@ class DesignSearch {
 	/** The group's own pieces on that design, as if nothing else were cut. */
 	private layAlone(candidate: Candidate, group: Group): Outcome {
 		const known = this.alone.get(candidate);
-		if (known) return known;
+		if (known && (isSettled(known) || known.most >= this.most)) return known;
 		const parts = group.seats.flatMap((seat) => this.parts[seat] ?? []);
 		const sorts = candidate.offers.map((offers) => offers.map((offer) => [offer]));
-		const outcome = layOut(parts, sorts, this.costOf, this.bench);
-		this.alone.set(candidate, outcome);
+		const outcome = layOut(parts, sorts, this.costOf, { ...this.bench, most: this.most });
+		this.alone.set(candidate, { ...outcome, most: this.most });
 		return outcome;
 	}
 
@@ -161,7 +177,8 @@ class DesignSearch {
 			);
 			if (this.isWon()) return;
 		}
-		this.take(layOut(this.parts, sorts, this.costOf, this.bench, least), chosen, barred, sorts, least);
+		const bench = { ...this.bench, most: this.most };
+		this.take(layOut(this.parts, sorts, this.costOf, bench, least), chosen, barred, sorts, least);
 	}
 
 	private take(
@@ -215,7 +232,7 @@ class DesignSearch {
 				mixed.map(({ part }) => part),
 				free,
 				this.costOf,
-				this.bench
+				{ ...this.bench, most: this.most }
 			);
 			if (beside.status !== 'planned') return null;
 			outcomes.push(beside);
@@ -262,6 +279,14 @@ class DesignSearch {
 	private leave(bound: Cost): void {
 		if (!this.unsettled || isBelow(bound, this.unsettled)) this.unsettled = bound;
 	}
+}
+
+function isSettled(outcome: Outcome): boolean {
+	return outcome.status === 'impossible' || (outcome.status === 'planned' && outcome.layout.minimum);
+}
+
+function larger(a: Cost, b: Cost): Cost {
+	return isBelow(a, b) ? b : a;
 }
 
 function sumOf(costs: readonly Cost[]): Cost {

@@ -1,10 +1,11 @@
+import type { Bill } from '../bill/bill';
 import type { MatchBudget, MatchRequest } from './request';
 import { answerOf } from './answer';
-import type { Bench } from './layout';
 import { matchBill } from './project';
 import { Purse } from './purse';
 import { emptyQueue, takeTurn, type Turn } from './queue';
 import { shelve } from './shelf';
+import { isOutOfTime } from './slot-lines';
 import type { MatchResponse, ProjectResult } from './verdict';
 
 export { mostAtOnce, type AtOnce } from './most';
@@ -23,9 +24,18 @@ function matchEach(
 	budget: MatchBudget
 ): ProjectResult[] {
 	const shelf = shelve(supplies, options.kerf);
-	return bills.map((bill) => {
-		const task = { bill, copies: copies[bill.key] ?? 1, on, beside: [] };
-		const matched = matchBill(task, shelf, benchFor(options, budget, bills.length));
+	const purse = new Purse(budget.work, budget.shouldStop);
+	const match = (bill: Bill, within: Purse) =>
+		matchBill({ bill, copies: copies[bill.key] ?? 1, on, beside: [] }, shelf, {
+			options,
+			purse: within,
+			goal: 'least'
+		});
+	const first = inShares(bills, purse.within(FIRST), match);
+	const hard = bills.filter((_, i) => first[i] && isOutOfTime(first[i]));
+	const again = new Map(inShares(hard, purse, match).map((matched) => [matched.bill, matched]));
+	return first.map((once) => {
+		const matched = again.get(once.bill) ?? once;
 		return answerOf(matched, matched.layouts, shelf.tools, options, false);
 	});
 }
@@ -35,9 +45,9 @@ function matchInTurn(
 	budget: MatchBudget
 ): ProjectResult[] {
 	let queue = emptyQueue(supplies, options.kerf);
-	const turns = bills.map((bill): Turn => {
+	const turns = inShares(bills, new Purse(budget.work, budget.shouldStop), (bill, purse): Turn => {
 		const task = { bill, copies: copies[bill.key] ?? 1, on };
-		const turn = takeTurn(queue, task, benchFor(options, budget, bills.length));
+		const turn = takeTurn(queue, task, { options, purse, goal: 'least' });
 		queue = turn.queue;
 		return turn;
 	});
@@ -48,6 +58,10 @@ function matchInTurn(
 	});
 }
 
-function benchFor(options: MatchRequest['options'], budget: MatchBudget, projects: number): Bench {
-	return { options, purse: Purse.of(budget, projects), goal: 'least' };
+/** Part of the work goes to a first pass over all projects, the rest to those that it left open. */
+const FIRST = 1 / 2;
+
+/** Each has an even share of what those before it left, so that a hard one cannot starve the others. */
+function inShares<T>(bills: readonly Bill[], purse: Purse, match: (bill: Bill, within: Purse) => T): T[] {
+	return bills.map((bill, i) => match(bill, purse.within(1 / (bills.length - i))));
 }

@@ -57,6 +57,8 @@ export interface Bench {
 	readonly purse: Purse;
 	/** `any`: only whether there is a plan; `least`: the cheapest; `shown`: the cheapest, with the fewest cuts too. */
 	readonly goal: 'any' | 'least' | 'shown';
+	/** The most that one call of the planner may spend. */
+	readonly most?: number;
 }
 
 /** Plans every piece of `parts`, part p from `sorts[p]`; the checker has passed what it returns. */
@@ -71,13 +73,16 @@ export function layOut(
 	const likely = parts.map((part, p) => likelySorts(part, sorts[p] ?? []));
 	const all = likely.every((own, p) => own === sorts[p]);
 	const question = questionOf(parts, likely, costOf);
-	const outcome = answered(question, costOf, bench);
-	if (all) return outcome;
+	if (all) return answered(question, costOf, bench);
+	const outcome = answered(question, costOf, { ...bench, most: Math.min(bench.most ?? LIKELY, LIKELY) });
 	if (outcome.status === 'impossible') return answered(questionOf(parts, sorts, costOf), costOf, bench);
 	if (outcome.status !== 'planned') return outcome;
 	const { layout } = outcome;
 	return { status: 'planned', layout: { ...layout, bound: least, minimum: !isBelow(least, layout.cost) } };
 }
+
+/** What the likely rows are worth: no proof among them proves anything of the rest. */
+const LIKELY = 8_000;
 
 function answered(question: Question, costOf: CostOf, bench: Bench): Outcome {
 	const { kinds } = question;
@@ -93,12 +98,10 @@ function answered(question: Question, costOf: CostOf, bench: Bench): Outcome {
 /** What the planner does before it counts, for each piece kind on each sheet kind. */
 const SETTING_UP = 10;
 
-function ask(problem: CutProblem, { purse, goal }: Bench): CutAnswer {
-	if (purse.isSpent) return { status: 'unknown', bound: [0, 0] };
-	const share = purse.share(goal === 'shown');
+function ask(problem: CutProblem, { purse, goal, most }: Bench): CutAnswer {
+	if (purse.isSpent) return { status: 'unknown', bound: [0, 0], work: 0 };
+	const share = purse.share(goal === 'shown', most);
 	const answer = (goal === 'any' ? planAny : planCuts)(problem, share);
-	const ended =
-		answer.status === 'impossible' || (answer.status === 'planned' && (answer.minimum || goal === 'any'));
-	purse.spend((ended ? 0 : share.work) + SETTING_UP * problem.pieces.length * (1 + problem.sheets.length));
+	purse.spend(answer.work + SETTING_UP * problem.pieces.length * (1 + problem.sheets.length));
 	return answer;
 }

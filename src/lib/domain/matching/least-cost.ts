@@ -12,12 +12,21 @@ export type Sorts = readonly (readonly Offer[])[];
  * piece fits nowhere or there is less paper than pieces, so that there is no layout at all.
  */
 export function leastCost(parts: readonly Part[], sorts: readonly Sorts[], costOf: CostOf): Cost | null {
-	const tally = new Tally(parts.length > 1 && sorts.some((own) => own !== sorts[0]));
+	const tally = new Tally(parts.length > 1 && sorts.some((own) => own !== sorts[0]) && rowsIn(sorts) <= MANY);
 	for (let p = 0; p < parts.length; p++) {
 		const part = parts[p];
 		if (part && !tally.add(part, sorts[p] ?? [], costOf)) return null;
 	}
 	return tally.least();
+}
+
+/** Of so many rows those that are offered to several parts count for each: the bound is no less true for it. */
+const MANY = 300;
+
+function rowsIn(sorts: readonly Sorts[]): number {
+	let rows = 0;
+	for (const own of sorts) for (const offers of own) rows += offers.length;
+	return rows;
 }
 
 class Tally {
@@ -65,19 +74,27 @@ class Tally {
 	private pile(offers: readonly Offer[], cost: number): void {
 		if (this.piled.has(offers)) return;
 		this.piled.add(offers);
+		const size = (offers[0]?.sheet.w ?? 0) * (offers[0]?.sheet.h ?? 0);
+		const count = this.countIn(offers);
+		if (count === 0) return;
+		if (cost === 0) {
+			this.left += size * count;
+			this.lefts.push({ size, count });
+		} else {
+			this.whole += size * count;
+			this.perArea = Math.min(this.perArea, cost / size);
+			this.cheapest = Math.min(this.cheapest, cost);
+		}
+	}
+
+	private countIn(offers: readonly Offer[]): number {
+		let count = 0;
 		for (const { sheet } of offers) {
 			if (this.seen?.has(sheet)) continue;
 			this.seen?.add(sheet);
-			const size = sheet.w * sheet.h;
-			if (cost === 0) {
-				this.left += size * sheet.count;
-				this.lefts.push({ size, count: sheet.count });
-			} else {
-				this.whole += size * sheet.count;
-				this.perArea = Math.min(this.perArea, cost / size);
-				this.cheapest = Math.min(this.cheapest, cost);
-			}
+			count += sheet.count;
 		}
+		return count;
 	}
 
 	least(): Cost | null {

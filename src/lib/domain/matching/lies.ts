@@ -5,10 +5,12 @@ import type { Sheet } from './shelf';
 
 /** How a piece may lie on a sheet so that one of these prints shows the right way up. */
 export function lieOn(cut: Cuttable, sheet: Sheet, prints: readonly Print[], terms: Terms): Lie {
+	const room = roomFor(cut, sheet);
+	if (room === LIES.never) return LIES.never;
 	if (!terms.cutsBoard && sheet.supply.kind === 'chipboard' && !isCutAlready(cut, sheet)) return LIES.never;
 	let lie: number = LIES.never;
 	for (const print of prints) lie |= lieUnder(cut, print.bound);
-	return (lie & roomFor(cut, sheet)) as Lie;
+	return (lie & room) as Lie;
 }
 
 /** As the print binds it, whether or not there is room. */

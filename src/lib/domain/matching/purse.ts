@@ -37,8 +37,8 @@ export class Purse {
 	}
 
 	/** What one call of the planner may spend. A plan that will be shown is polished, one of many tried is not. */
-	share(shown: boolean): CutBudget {
-		const work = Math.ceil(this.left / 4);
+	share(shown: boolean, most = Infinity): CutBudget {
+		const work = Math.min(most, Math.ceil(this.left / 4));
 		const polish = shown ? Math.min(MOST_POLISH, Math.ceil(this.work / 50)) : 0;
 		return { work, polish, ...(this.shouldStop ? { shouldStop: this.shouldStop } : {}) };
 	}

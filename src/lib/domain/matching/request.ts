@@ -16,7 +16,7 @@ export interface MatchRequest {
 	readonly options: MatchOptions;
 }
 
-/** Work is shared out evenly over the projects, so equal work gives equal answers. */
+/** Work is shared out over the projects; equal work gives equal answers. */
 export interface MatchBudget {
 	readonly work: number;
 	readonly shouldStop?: () => boolean;

@@ -33,6 +33,8 @@ export interface Shelf {
 	readonly tools: readonly ToolSupply[];
 	/** What slots that ask for the same have found here. */
 	readonly found: Map<string, Uses>;
+	/** The shelf without what arrives after a day, by day. */
+	readonly until: Map<string, Shelf>;
 }
 
 /** A row as far as it may be used: some of its sheets, or a remnant of one. */
@@ -73,7 +75,7 @@ export function shelfOf(
 		return { ...one, prints: printsOf(one.supply, classesOf), sort, left: one.remnant || one.supply.offcut };
 	});
 	classifyDesigns(sheets, classes);
-	return { sheets: byKind(sheets), consumables, tools, found: new Map() };
+	return { sheets: byKind(sheets), consumables, tools, found: new Map(), until: new Map() };
 }
 
 /** A branding strip comes off with the first cut, which takes at least the blade's width. */
@@ -96,13 +98,17 @@ export function stockOf(supply: SheetSupply, order: number, kerf: Length): Stock
 
 /** The shelf without what arrives after that day. */
 export function shelfUntil(shelf: Shelf, day: string): Shelf {
+	const known = shelf.until.get(day);
+	if (known) return known;
 	const isHere = ({ arrives }: Supply) => arrives === null || arrives <= day;
 	const stock = [...shelf.sheets.values()].flat().sort((a, b) => a.order - b.order);
-	return shelfOf(
+	const made = shelfOf(
 		stock.filter(({ supply }) => isHere(supply)),
 		shelf.consumables.filter(isHere),
 		shelf.tools.filter(isHere)
 	);
+	shelf.until.set(day, made);
+	return made;
 }
 
 function sortOf({ supply, w, h, remnant }: Stock): string {

@@ -4,6 +4,10 @@ import { VERDICTS, type LineResult, type Verdict } from './verdict';
 
 export const OUT_OF_TIME = 'no plan found in the time given';
 
+export function isOutOfTime({ lines }: { readonly lines: readonly LineResult[] }): boolean {
+	return lines.some(({ why }) => why === OUT_OF_TIME);
+}
+
 /** A slot's line as its layout shows it: what was used, and what had to be granted for it. */
 export function slotLine(part: Part, layout: Layout, today: string): LineResult {
 	const laid = layout.sheets.flatMap((opened) =>
