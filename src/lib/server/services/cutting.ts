@@ -142,7 +142,6 @@ function offcutOf(whole: SheetSupply, w: number, h: number, sheets: number, bin:
 		...whole,
 		...{ w, h, sheets, bin },
 		key: keyFrom(`${whole.key.slice(0, 40)} offcut`, 'offcut'),
-		faces: whole.faces.length > 0 ? whole.faces : [],
 		offcut: true,
 		count: 'counted',
 		strip: null,
