@@ -1,4 +1,4 @@
-import type { Face, SheetGoods, SheetSupply } from '$lib/domain/stash';
+import type { Face, SheetGoods } from '$lib/domain/stash';
 
 /** What a drawing needs to know of a paper: never its price, its bin or its count. */
 export interface Paper {
@@ -9,14 +9,6 @@ export interface Paper {
 	/** Where its own picture of face A is, or null. */
 	readonly picture: string | null;
 }
-
-export const paperOf = (supply: SheetSupply, picture: string | null): Paper => ({
-	name: supply.name,
-	kind: supply.kind,
-	colours: supply.colours,
-	faces: supply.faces,
-	picture
-});
 
 /** A sheet's colour where nobody gave one. */
 const KIND_COLOURS: Readonly<Record<SheetGoods, string>> = {

@@ -6,7 +6,6 @@ export {
 	type MatchRequestDocument,
 	type MovementDocument
 } from './document-schema';
-export { LIMITS } from './fields';
 export { readBill } from './read-bill';
 export { readDocument, readMatchRequest, type Exchange, type MatchRequest } from './read-document';
 export { writeChange, type Movement } from './read-movement';
