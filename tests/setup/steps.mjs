@@ -1,7 +1,7 @@
 import { spawn } from 'node:child_process';
 import { root } from './ready.mjs';
 
-const PATIENCE_MS = 8 * 60_000;
+const PATIENCE_MS = 20 * 60_000;
 
 /**
  * Starts steps in their order, `atOnce` at a time, each once those in its `after` are done. A step whose
