@@ -1,8 +1,9 @@
-import { plannedSheet, reachOf } from './assembly';
+import { reachOf } from './assembly';
 import type { LaidSheet } from './layout';
 import type { Matched, PricedLayout } from './project';
 import type { Shelf } from './shelf';
 import type { MatchOptions, Plan, PlannedSheet, ProjectResult } from './verdict';
+import { wholeSheets } from './whole-sheets';
 
 /** `layouts`: all in which the project's pieces may lie; other projects' pieces may lie there too. */
 export function answerOf(
@@ -26,14 +27,7 @@ function planOf(
 	const own = layouts.filter(({ layout }) => layout.sheets.some((sheet) => isIn(project, sheet)));
 	if (own.length === 0) return null;
 	const reach = reachOf(tools, options);
-	const whole = new Map<string, { sheet: PlannedSheet; order: number }>();
-	for (const laid of layouts.flatMap(({ layout }) => layout.sheets)) {
-		const key = JSON.stringify([laid.sheet.supply.key, laid.nth]);
-		const known = whole.get(key)?.sheet;
-		const added = plannedSheet(laid, reach, options);
-		whole.set(key, { sheet: known ? cutFurther(known, added, laid) : added, order: laid.sheet.order });
-	}
-	const sheets = [...whole.values()]
+	const sheets = wholeSheets(layouts, reach, options)
 		.filter(({ sheet }) => sheet.placements.some((placement) => placement.project === project))
 		.sort((a, b) => a.order - b.order || a.sheet.nth - b.sheet.nth);
 	return { proof: proofOf(own), sheets: sheets.map(({ sheet }) => keptOffcuts(sheet, options)) };
@@ -41,18 +35,6 @@ function planOf(
 
 function isIn(project: string, { placements }: LaidSheet): boolean {
 	return placements.some(({ part }) => part.project === project);
-}
-
-/** A sheet of which a remnant was cut from for another project. */
-function cutFurther(sheet: PlannedSheet, added: PlannedSheet, { sheet: remnant }: LaidSheet): PlannedSheet {
-	const isLeft = ({ x, y, w, h }: PlannedSheet['offcuts'][number]) =>
-		x !== remnant.x || y !== remnant.y || w !== remnant.w || h !== remnant.h;
-	return {
-		...sheet,
-		placements: [...sheet.placements, ...added.placements],
-		cuts: [...sheet.cuts, ...added.cuts],
-		offcuts: [...sheet.offcuts.filter(isLeft), ...added.offcuts]
-	};
 }
 
 function keptOffcuts(sheet: PlannedSheet, { keepOffcut }: MatchOptions): PlannedSheet {

@@ -3,7 +3,9 @@ import type { Bench, LaidSheet } from './layout';
 import type { Part } from './parts';
 import { matchBill, type Matched, type PricedLayout, type Task } from './project';
 import { shelfOf, shelve, stockOf, type Shelf, type Stock } from './shelf';
-import { isWorse } from './slot-lines';
+import { isWorse, OUT_OF_TIME, worst } from './slot-lines';
+import type { LineResult } from './verdict';
+import { areSoundTogether } from './whole-sheets';
 
 /** What the projects so far have promised themselves, and how their sheets are laid out together. */
 export interface Queue {
@@ -31,17 +33,37 @@ export function emptyQueue(supplies: readonly Supply[], kerf: number): Queue {
  */
 export function takeTurn(queue: Queue, task: Omit<Task, 'beside'>, bench: Bench): Turn {
 	const left = matchBill({ ...task, beside: [] }, shelfLeft(queue), bench);
-	if (left.verdict === 'now') return { matched: left, nowIfFirst: false, queue: promise(queue, left) };
+	if (left.verdict === 'now' && isSound(queue, left, bench))
+		return { matched: left, nowIfFirst: false, queue: promise(queue, left) };
 	const alone = matchBill({ ...task, beside: [] }, shelve(queue.supplies, queue.kerf), bench);
-	if (!isWorse(left.verdict, alone.verdict)) return kept(queue, left, false);
+	if (!isWorse(left.verdict, alone.verdict)) return kept(queue, left, false, bench);
 	const joint = matchBill({ ...task, beside: queue.parts }, shelfWithout(queue), bench);
-	if (!isWorse(left.verdict, joint.verdict)) return kept(queue, left, alone.verdict === 'now');
-	return { matched: joint, nowIfFirst: false, queue: promise(relaid(queue, joint), joint) };
+	const free = relaid(queue, joint);
+	if (!isWorse(left.verdict, joint.verdict) || !isSound(free, joint, bench))
+		return kept(queue, left, alone.verdict === 'now', bench);
+	return { matched: joint, nowIfFirst: false, queue: promise(free, joint) };
 }
 
-function kept(queue: Queue, matched: Matched, nowIfFirst: boolean): Turn {
+/** Whether the sheets come apart as the queue and this project cut them together. */
+function isSound({ layouts }: Queue, matched: Matched, { options }: Bench): boolean {
+	return areSoundTogether([...layouts, ...matched.layouts], matched.layouts, options);
+}
+
+function kept(queue: Queue, matched: Matched, nowIfFirst: boolean, bench: Bench): Turn {
 	if (matched.verdict === 'short') return { matched, nowIfFirst, queue };
+	if (!isSound(queue, matched, bench)) return { matched: unplanned(matched), nowIfFirst: false, queue };
 	return { matched, nowIfFirst: false, queue: promise(queue, matched) };
+}
+
+/** Without a layout that the checker passes nothing is promised. */
+function unplanned(matched: Matched): Matched {
+	const lines = matched.lines.map((line): LineResult =>
+		line.line.startsWith('slots/')
+			? { line: line.line, verdict: 'look', supplies: [], swap: null, why: OUT_OF_TIME }
+			: line
+	);
+	const verdict = worst(lines.map((line) => line.verdict));
+	return { ...matched, lines, verdict, after: null, layouts: [], parts: [], drawn: new Map() };
 }
 
 function promise(queue: Queue, { layouts, parts, drawn }: Matched): Queue {
