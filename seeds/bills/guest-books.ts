@@ -41,9 +41,8 @@ export const guestBooks: BillDocument = {
 	],
 	adhesives: [{ key: 'paste', name: 'Case glue', kind: 'glue', need: '60 ml' }],
 	tools: [
-		{ key: 'knife', name: 'Board knife', kind: 'craft-knife', cuts: ['board'] },
+		{ key: 'cutter', name: 'Guillotine', kind: 'guillotine-cutter', reach: '15 in', cuts: ['board'] },
 		{ key: 'rule', name: 'Steel rule', kind: 'ruler', reach: '15 in' },
-		{ key: 'mat', name: 'Cutting mat', kind: 'cutting-mat' },
 		{
 			key: 'score',
 			name: 'Scoring board',
@@ -56,8 +55,8 @@ export const guestBooks: BillDocument = {
 	],
 	steps: [
 		{
-			text: 'Cut the boards in light passes against the rule, and the cloth with its grain along the spine.',
-			tools: ['knife', 'rule', 'mat'],
+			text: 'Cut the boards one at a time in the guillotine, and the cloth with its grain along the spine.',
+			tools: ['cutter', 'rule'],
 			pieces: ['board', 'spine', 'case']
 		},
 		{

@@ -17,7 +17,7 @@ export const tools = (today: string): Row[] =>
 				kind: 'guillotine-cutter',
 				name: 'Crop-night guillotine',
 				reach: '18 in',
-				cuts: ['paper'],
+				cuts: ['paper', 'board'],
 				borrowedUntil: daysAfter(today, 4),
 				bin: 'Bench'
 			},
