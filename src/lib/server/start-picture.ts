@@ -1,8 +1,8 @@
 import type { ProjectResult } from '../domain/matching/verdict';
 import { STARTERS } from '../starter';
 import { EXAMPLE_STASH } from '../starter/example';
+import { answered } from './answered';
 import { today } from './clock';
-import { Invalid } from './errors';
 import { matcher } from './matcher';
 
 /** Far more than it takes, so that a busy machine says the same as an idle one. */
@@ -26,7 +26,5 @@ async function workOut(): Promise<readonly ProjectResult[]> {
 		budgetMs: BUDGET_MS
 	};
 	const reply = await matcher.ask({ request, today: today() }, BUDGET_MS, 'room');
-	if (!reply.ok)
-		throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
-	return reply.response.results;
+	return answered(reply).response.results;
 }

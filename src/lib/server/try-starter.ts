@@ -2,8 +2,8 @@ import type { SupplyDocument } from '../domain/exchange';
 import type { ProjectResult } from '../domain/matching/verdict';
 import type { Try, TryRow } from '../schemas/try';
 import { STARTERS } from '../starter';
+import { answered } from './answered';
 import { today } from './clock';
-import { Invalid } from './errors';
 import { matcher } from './matcher';
 
 const BUDGET_MS = 1500;
@@ -24,11 +24,8 @@ export async function tryStarter({ project, units, papers }: Try) {
 		budgetMs: BUDGET_MS,
 		options: { units }
 	};
-	const reply = await matcher.ask({ request, today: today() }, BUDGET_MS);
-	if (!reply.ok) {
-		throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
-	}
-	return { bill: starter.bill, kit: starter.kit, sheets, result: reply.response.results[0] as ProjectResult };
+	const { response } = answered(await matcher.ask({ request, today: today() }, BUDGET_MS));
+	return { bill: starter.bill, kit: starter.kit, sheets, result: response.results[0] as ProjectResult };
 }
 
 function supplyOf({ kind, size, sheets, direction }: TryRow, index: number) {

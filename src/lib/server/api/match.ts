@@ -1,6 +1,6 @@
 import type { MatchResponse } from '../../domain/matching/verdict';
+import { answered } from '../answered';
 import { today } from '../clock';
-import { Invalid } from '../errors';
 import { matcher } from '../matcher';
 
 /** A visitor's question may take no longer than this; a larger `budgetMs` counts as this. */
@@ -10,9 +10,7 @@ const USUAL_MS = 2000;
 /** Answers a stateless match request off the event loop. @throws {Invalid} with every issue of the document */
 export async function answerOf(sent: unknown): Promise<MatchResponse> {
 	const request = atMost(sent);
-	const reply = await matcher.ask({ request, today: today() }, budgetOf(request));
-	if (reply.ok) return reply.response;
-	throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
+	return answered(await matcher.ask({ request, today: today() }, budgetOf(request))).response;
 }
 
 function atMost(sent: unknown): unknown {

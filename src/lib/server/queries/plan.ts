@@ -2,7 +2,7 @@ import type { Loss } from '../../domain/matching';
 import type { ProjectResult } from '../../domain/matching/verdict';
 import { writeExact } from '../../domain/length';
 import type { Reader } from '../db/client';
-import { Invalid } from '../errors';
+import { answered } from '../answered';
 import { matcher, type Matcher } from '../matcher';
 import { Reckonings } from '../reckonings';
 import type { Actor } from '../session';
@@ -11,7 +11,7 @@ import { listProjects, type ProjectDetail, type ProjectRow } from './projects';
 import { getRoom, type RoomDetail } from './rooms';
 import { stashText } from './stash';
 
-type Planned = Pick<ProjectDetail, 'id' | 'key' | 'bill' | 'copies'>;
+type Planned = Pick<ProjectDetail, 'id' | 'key' | 'bill' | 'copies' | 'version'>;
 
 /** One project may take longer than its share of a whole room's ranking. */
 const BUDGET_MS = 8000;
@@ -27,7 +27,7 @@ export async function planFor(
 	by: Matcher = matcher
 ): Promise<ProjectResult> {
 	const room = await getRoom(db, actor);
-	return plans.of(`${project.id} ${on}`, room.revision, async () => {
+	return plans.of(named(project, on), room.revision, async () => {
 		const { response } = await ask(db, actor, room, [project], on, by);
 		return response.results[0]!;
 	});
@@ -41,14 +41,19 @@ export async function lossesFor(
 	on: string,
 	by: Matcher = matcher
 ): Promise<readonly Loss[]> {
-	const [room, { plan }] = await Promise.all([getRoom(db, actor), planFor(db, actor, project, on, by)]);
+	// The room first: a plan may be newer than the revision that its losses are kept under, never older.
+	const room = await getRoom(db, actor);
+	const { plan } = await planFor(db, actor, project, on, by);
 	if (!plan) return [];
-	return losses.of(`${project.id} ${on}`, room.revision, async () => {
+	return losses.of(named(project, on), room.revision, async () => {
 		const projects = await listProjects(db, actor);
 		const reply = await ask(db, actor, room, projects, on, by, { project: project.key, plan });
 		return reply.losses ?? [];
 	});
 }
+
+/** The project as it was read, which may be before the room's revision was: an older bill's plan is another. */
+const named = ({ id, version, copies }: Planned, on: string) => `${id} ${version} ${copies} ${on}`;
 
 async function ask(
 	db: Reader,
@@ -68,7 +73,5 @@ async function ask(
 		options: { units, reach: reach === null ? null : writeExact(reach, 'mm'), keepOffcut: null }
 	};
 	const stash = await stashText(db, actor);
-	const reply = await by.ask({ request, today: on, stash, ...(cut && { cut }) }, BUDGET_MS, 'room');
-	if (reply.ok) return reply;
-	throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
+	return answered(await by.ask({ request, today: on, stash, ...(cut && { cut }) }, BUDGET_MS, 'room'));
 }

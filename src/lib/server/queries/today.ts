@@ -4,7 +4,8 @@ import type { Unlock } from '../../domain/matching';
 import type { ProjectResult } from '../../domain/matching/verdict';
 import type { Reader } from '../db/client';
 import { rooms } from '../db/schema/rooms';
-import { Invalid, NotFound } from '../errors';
+import { answered } from '../answered';
+import { NotFound } from '../errors';
 import { matcher, type Matcher } from '../matcher';
 import { Reckonings } from '../reckonings';
 import type { Actor } from '../session';
@@ -104,7 +105,5 @@ async function asked(
 		}
 	};
 	const stash = await stashText(db, actor);
-	const reply = await by.ask({ request, today: on, stash, unlocks }, 2 * BUDGET_MS, 'room');
-	if (reply.ok) return reply;
-	throw new Invalid(reply.issues.map(({ path, message }) => ({ path: path.split('.'), message })));
+	return answered(await by.ask({ request, today: on, stash, unlocks }, 2 * BUDGET_MS, 'room'));
 }
