@@ -234,6 +234,56 @@ describe('a plan that the stash no longer bears', () => {
 		expect((await supplyById(db.reader, actor, oat)).amount).toBe(3);
 	});
 
+	it('is refused while the paper is still on order', async () => {
+		const { actor, cardsId } = await bench();
+		await stock(db, actor, cardstock({ key: 'coming', arrives: '2999-01-01' }));
+		await stock(db, actor, cardstock({ key: 'came', arrives: '2001-01-01' }));
+		await expect(
+			cut(
+				actor,
+				cardsId,
+				plan((s) => (s.supply = 'coming'))
+			)
+		).rejects.toThrow('on order');
+		await cut(
+			actor,
+			cardsId,
+			plan((s) => (s.supply = 'came'))
+		);
+	});
+
+	it.each<[string, Partial<Slots[number]>[], Partial<SheetRow>, boolean]>([
+		['the design of another collection than was chosen', [{ design: 'Oat', collection: 'Field' }], {}, false],
+		['the chosen design', [{ design: 'Oat', collection: 'Lane' }], {}, true],
+		['two designs for slots that are the same', [{ sameAs: 'other' }], { collection: 'Field' }, false],
+		['one design for slots that are the same', [{ sameAs: 'other' }], { collection: 'Lane' }, true],
+		['one design for slots that differ', [{ differentFrom: ['other'] }], { collection: 'Lane' }, false],
+		['two designs for slots that differ', [{ differentFrom: ['other'] }], { collection: 'Field' }, true]
+	])('with %s', async (_, [set], otherRow, passes) => {
+		const actor = await makeRoom(db);
+		const faces = [{ design: 'Oat', direction: 'none' as const }];
+		await stock(db, actor, cardstock({ faces, collection: 'Lane' }));
+		await stock(db, actor, cardstock({ key: 'second', faces, ...otherRow }));
+		const kind = 'cardstock';
+		const bill = cards({
+			slots: [
+				{ key: 'card', material: { kind }, ...set },
+				{ key: 'other', material: { kind } }
+			],
+			pieces: [
+				{ key: 'front', slot: 'card', w: '5 1/2 in', h: '4 1/4 in', qty: 2 },
+				{ key: 'back', slot: 'other', w: '5 1/2 in', h: '4 1/4 in', qty: 2 }
+			]
+		});
+		const cardsId = await project(db, actor, bill);
+		const second = drawn();
+		second.supply = 'second';
+		for (const placed of second.placements) placed.piece = 'back';
+		const result = cut(actor, cardsId, { sheets: [drawn(), second] });
+		if (passes) await result;
+		else await expect(result).rejects.toThrow('bill has changed');
+	});
+
 	it('is refused to viewers, and to people of other rooms', async () => {
 		const { actor, cardsId } = await bench();
 		const viewer = await joinRoom(db, actor.roomId, 'viewer');
@@ -243,6 +293,8 @@ describe('a plan that the stash no longer bears', () => {
 	});
 });
 
+type Slots = ReturnType<typeof cards>['slots'];
+type SheetRow = Parameters<typeof cardstock>[0] & object;
 const upright = { key: 'front', slot: 'card', w: '5 1/2 in', h: '4 1/4 in', qty: 2, up: 'h' } as const;
 
 describe('whatever is done', () => {

@@ -1,4 +1,4 @@
-/** The day it is now in UTC, YYYY-MM-DD. */
-export function today(): string {
-	return new Date().toISOString().slice(0, 10);
+/** The day it is in UTC, YYYY-MM-DD: now, or at an instant in ms. */
+export function today(at = Date.now()): string {
+	return new Date(at).toISOString().slice(0, 10);
 }

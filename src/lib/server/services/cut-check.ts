@@ -1,4 +1,5 @@
 import type { Bill, Material, Piece, Slot } from '../../domain/bill/bill';
+import { partsOf, type Part } from '../../domain/matching/parts';
 import type { SheetSupply } from '../../domain/stash';
 import type { ShownSheet } from '../../schemas/cutting';
 
@@ -15,44 +16,67 @@ export interface Cuttable {
 
 type Placed = ShownSheet['placements'][number];
 
-/** What no longer holds of the plan, as a sentence; null where the stash and the bills still bear it. */
+/**
+ * What no longer holds of the plan, as a sentence; null where the stash and the bills still bear it.
+ * @param on the day it is cut, YYYY-MM-DD
+ */
 export function checkStanding(
 	sheets: readonly ShownSheet[],
 	owned: ReadonlyMap<string, OwnedSheet>,
-	bills: ReadonlyMap<string, Cuttable>
+	bills: ReadonlyMap<string, Cuttable>,
+	on: string
 ): string | null {
+	const parts = [...bills.values()].flatMap(({ bill, copies }) => partsOf(bill, copies, on));
 	const opened = new Set<string>();
-	const designs = new Map<string, string>();
+	const shown = new Map<string, Set<string>>();
 	const cut = new Map<string, number>();
 	for (const sheet of sheets) {
 		const supply = owned.get(sheet.supply)?.supply;
 		if (!supply || supply.w !== sheet.w || supply.h !== sheet.h) return STASH;
+		if (supply.arrives !== null && supply.arrives > on) return COMING;
 		const named = `${sheet.supply} ${sheet.nth}`;
 		if (sheet.nth > supply.sheets || opened.has(named)) return STASH;
 		opened.add(named);
 		for (const placed of sheet.placements) {
-			const project = bills.get(placed.project);
-			const piece = project?.bill.pieces.find(({ key }) => key === placed.piece);
-			const slot = project?.bill.slots.find(({ key }) => key === piece?.slot);
-			if (!project || !piece || !slot) return BILL;
+			const part = parts.find((one) => one.project === placed.project && cuttableOf(one, placed));
+			const { piece, qty } = (part && cuttableOf(part, placed)) ?? {};
+			if (!part || !piece || qty === undefined) return BILL;
 			const which = JSON.stringify([placed.project, piece.key]);
 			cut.set(which, (cut.get(which) ?? 0) + 1);
-			if (cut.get(which)! > piece.qty * project.copies || !isCutTo(piece, placed)) return BILL;
-			if (!mayServe(slot, supply)) return BILL;
+			if (cut.get(which)! > qty || !isCutTo(piece, placed)) return BILL;
+			if (!mayServe(part.slot, supply)) return BILL;
 			const print = printOn(supply, placed.face);
 			if (!print || !standsRight(piece, placed, print.direction !== 'none')) return STASH;
-			if (slot.design !== null && print.design !== slot.design) return BILL;
-			const role = JSON.stringify([placed.project, slot.key]);
-			const design = `${supply.collection ?? ''}\n${print.design}`;
-			if (slot.designs === 'one' && (designs.get(role) ?? design) !== design) return BILL;
-			designs.set(role, design);
+			if (!isChosen(part.slot, supply, print.design)) return BILL;
+			const designs = shown.get(part.group) ?? new Set();
+			shown.set(part.group, designs.add(`${supply.collection ?? ''}\n${print.design}`));
 		}
 	}
-	return null;
+	return parts.every((part) => isRelated(part, shown)) ? null : BILL;
 }
 
 const STASH = 'The stash has changed since this plan was drawn.';
 const BILL = 'The bill has changed since this plan was drawn.';
+const COMING = 'Some of this paper is still on order.';
+
+function cuttableOf({ pieces }: Part, placed: Placed) {
+	return pieces.find(({ piece }) => piece.key === placed.piece);
+}
+
+/** The design that was chosen for the slot, where one was. */
+function isChosen({ design, collection }: Slot, supply: SheetSupply, shown: string): boolean {
+	return design === null || (design === shown && (collection === null || collection === supply.collection));
+}
+
+/** One design where the bill wants one, over all slots that are to be the same; none that another is to differ from. */
+function isRelated(
+	{ group, single, differs }: Part,
+	shown: ReadonlyMap<string, ReadonlySet<string>>
+): boolean {
+	const mine = shown.get(group) ?? new Set();
+	if (single && mine.size > 1) return false;
+	return [...differs].every((other) => [...mine].every((design) => !shown.get(other)?.has(design)));
+}
 
 /** As large as the bill has it, or smaller by no more than its allowance. */
 function isCutTo(piece: Piece, { w, h, turned }: Placed): boolean {

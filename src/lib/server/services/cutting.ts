@@ -4,6 +4,7 @@ import { readBill } from '../../domain/exchange';
 import type { SheetSupply } from '../../domain/stash';
 import { keyFrom } from '../../schemas/key';
 import type { ShownSheet, UseSheets } from '../../schemas/cutting';
+import { today } from '../clock';
 import type { Transaction } from '../db/client';
 import { rooms } from '../db/schema/rooms';
 import { bins, supplies } from '../db/schema/supplies';
@@ -27,7 +28,7 @@ export async function useSheets(tx: Transaction, actor: Actor, input: UseSheets)
 	await perform(tx, actor, { id, kind: 'cut', projectId: project }, async (at) => {
 		const owned = await sheetsNamed(tx, actor, plan.sheets);
 		const bills = await billsNamed(tx, actor, project, plan.sheets);
-		const standing = checkStanding(plan.sheets, owned, bills);
+		const standing = checkStanding(plan.sheets, owned, bills, today(at));
 		if (standing) throw new Conflict(`${standing} Look at the new plan.`);
 		const faults = checkGeometry(plan.sheets, owned);
 		if (faults.length > 0)
