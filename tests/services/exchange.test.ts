@@ -129,6 +129,29 @@ describe('importing', () => {
 		expect((await supplyById(db.reader, actor, oat)).deletedAt).not.toBeNull();
 	});
 
+	it('is undone as one also where its ledger has something undone in it', async () => {
+		const { actor, oat } = await furnished();
+		const act = v7();
+		await db.write((tx) => useSupply(tx, actor, { id: act, supply: oat, kind: 'used', amount: 2 }));
+		await db.write((tx) => undo(tx, actor, { id: v7(), act }));
+		const other = await makeRoom(db);
+		const id = v7();
+		await take(other, await exportRoom(db.reader, actor), id);
+		expect((await byName(other)).find(({ key }) => key === 'oat')?.amount).toBe(7);
+		await db.write((tx) => undo(tx, other, { id: v7(), act: id }));
+		expect(await byName(other)).toEqual([]);
+	});
+
+	it('is refused where a key is something measured differently here', async () => {
+		const { actor } = await furnished();
+		const glue = { key: 'tape', kind: 'glue', name: 'Glue', left: '100 ml' } as const;
+		const document = { format: 'paperlarder', version: 1, supplies: [glue] } as ExchangeDocument;
+		await expect(take(actor, document)).rejects.toBeInstanceOf(Invalid);
+		const roll = { ...glue, kind: 'washi-tape', left: '98 in' } as const;
+		await take(actor, { ...document, supplies: [roll] });
+		expect((await byName(actor)).find(({ key }) => key === 'tape')).toMatchObject({ kind: 'washi-tape' });
+	});
+
 	it('is not a viewer’s to do', async () => {
 		const { actor } = await furnished();
 		const viewer = await joinRoom(db, actor.roomId, 'viewer');

@@ -129,6 +129,18 @@ describe('the ledger', () => {
 			db.write((tx) => useSupply(tx, actor, { id: v7(), supply: toolId, kind: 'bought', amount: 1 }))
 		).rejects.toThrow('row of its own');
 	});
+
+	it('never brings what is still on order with what was bought', async () => {
+		const actor = await makeRoom(db);
+		const supply = await stock(db, actor, cardstock({ arrives: '2999-01-01' }));
+		const buy = (id: string) =>
+			db.write((tx) => useSupply(tx, actor, { id: v7(), supply: id, kind: 'bought', amount: 1 }));
+		await expect(buy(supply)).rejects.toThrow('still on order');
+		expect(await supplyById(db.reader, actor, supply)).toMatchObject({ amount: 10, arrives: '2999-01-01' });
+		const nothing = await stock(db, actor, cardstock({ sheets: 0, arrives: '2999-01-01' }));
+		await buy(nothing);
+		expect(await supplyById(db.reader, actor, nothing)).toMatchObject({ amount: 1, arrives: null });
+	});
 });
 
 describe('editing, moving and undoing', () => {

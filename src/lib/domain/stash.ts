@@ -45,6 +45,20 @@ export const SUPPLY_MEASURES = {
 	embellishments: 'count'
 } as const;
 
+/** What can happen to a supply: the kinds of line in its ledger. */
+export const MOVEMENT_KINDS = [
+	'bought',
+	'counted',
+	'cut',
+	'used',
+	'spoiled',
+	'offcut-in',
+	'offcut-out',
+	'lent',
+	'returned',
+	'passed-on'
+] as const;
+
 export const TOOL_KINDS = [
 	'trimmer',
 	'guillotine-cutter',

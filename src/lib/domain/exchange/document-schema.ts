@@ -1,4 +1,5 @@
 import { z } from 'zod';
+import { MOVEMENT_KINDS } from '../stash';
 import { billSchema } from './bill-schema';
 import {
 	dateField,
@@ -14,24 +15,11 @@ import { supplySchema } from './supply-schema';
 
 const bin = z.strictObject({ key: keyField, name: nameField });
 
-const MOVEMENTS = [
-	'bought',
-	'counted',
-	'cut',
-	'used',
-	'spoiled',
-	'offcut-in',
-	'offcut-out',
-	'lent',
-	'returned',
-	'passed-on'
-] as const;
-
 /** One line of the stash's ledger. `change` is signed: a whole number, or a length or volume like `-93 in`. */
 const movement = z.strictObject({
 	key: keyField,
 	supply: keyField,
-	kind: z.enum(MOVEMENTS),
+	kind: z.enum(MOVEMENT_KINDS),
 	change: z.union([z.int().min(-LIMITS.count).max(LIMITS.count), measuredField]),
 	at: instantField,
 	act: keyField.optional(),

@@ -16,7 +16,7 @@ import { amountOf, columnsOf } from '../supply-row';
 import { binNamed, binsNamed } from './bins';
 import { perform, requireWriter, type Entry } from './ledger';
 import { billText } from './projects';
-import { createRows, differing } from './supplies';
+import { createRows, differing, isMeasuredAlike } from './supplies';
 
 export interface ImportSummary {
 	readonly supplies: { readonly added: number; readonly changed: number; readonly unchanged: number };
@@ -103,7 +103,7 @@ async function planImport(
 		const row = known.get(supply.key);
 		return row ? [{ row, supply }] : [];
 	});
-	present.forEach(refuseOtherGroup);
+	present.forEach(refuseOtherMeasure);
 	const changed = present.filter(({ row, supply }) => differs(row, supply));
 	const there = new Set((await listBins(db, actor)).map(({ name }) => name));
 	return {
@@ -158,8 +158,8 @@ async function knownSupplies(
 	return known;
 }
 
-function refuseOtherGroup({ row, supply }: { row: SupplyRow; supply: Supply }): void {
-	if (row.group === supply.group) return;
+function refuseOtherMeasure({ row, supply }: { row: SupplyRow; supply: Supply }): void {
+	if (isMeasuredAlike(row, supply)) return;
 	throw new Invalid([
 		{
 			path: ['document', 'supplies'],

@@ -1,8 +1,9 @@
 import { and, eq, inArray, sql } from 'drizzle-orm';
 import { v7 } from 'uuid';
+import type { MOVEMENT_KINDS } from '../../domain/stash';
 import type { Transaction } from '../db/client';
 import { acts, movements } from '../db/schema/ledger';
-import type { ACT_KINDS, Change, MOVEMENT_KINDS } from '../db/schema/ledger';
+import type { ACT_KINDS, Change } from '../db/schema/ledger';
 import { supplies } from '../db/schema/supplies';
 import { Conflict, Forbidden, NotFound } from '../errors';
 import { inLots } from '../in-lots';
@@ -81,13 +82,15 @@ export function undo(tx: Transaction, actor: Actor, input: { id: string; act: st
 			.select()
 			.from(movements)
 			.where(and(eq(movements.roomId, actor.roomId), eq(movements.act, input.act)));
+		// An imported ledger brings movements with their undoing: those are undone by name already.
+		const undoneHere = new Set(booked.map(({ undoes }) => undoes));
 		return {
 			changes,
 			entries: booked.map(({ id, supplyId, kind, delta }) => ({
 				supplyId,
 				kind,
 				delta: 0 - delta,
-				undoes: id
+				...(!undoneHere.has(id) && { undoes: id })
 			}))
 		};
 	});

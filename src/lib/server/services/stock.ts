@@ -9,6 +9,7 @@ import type {
 	TrashSupplies,
 	UseSupply
 } from '../../schemas/supplies';
+import { today } from '../clock';
 import type { Transaction } from '../db/client';
 import { supplies } from '../db/schema/supplies';
 import { Invalid } from '../errors';
@@ -54,17 +55,24 @@ export async function recount(tx: Transaction, actor: Actor, input: Recount): Pr
 
 /** Books what was used, spoiled, passed on or bought. @throws {Conflict} where there isn't that much. */
 export async function useSupply(tx: Transaction, actor: Actor, input: UseSupply): Promise<void> {
-	await perform(tx, actor, { id: input.id, kind: 'use' }, async () => {
+	await perform(tx, actor, { id: input.id, kind: 'use' }, async (at) => {
 		const row = await storedSupply(tx, actor, input.supply);
 		const amount = amountFor(row, input.amount, await roomUnits(tx, actor), ['amount']);
 		const delta = input.kind === 'bought' ? amount : -amount;
 		if (row.group === 'tool' && row.amount + delta > 1) {
 			throw new Invalid([{ path: ['amount'], message: 'Each tool has a row of its own. Add another row.' }]);
 		}
+		if (input.kind === 'bought' && row.amount > 0 && row.arrives !== null && row.arrives > today(at)) {
+			throw new Invalid([{ path: ['amount'], message: STILL_ON_ORDER }]);
+		}
 		const arrived = input.kind === 'bought' ? differing(row, { arrives: null }) : [];
 		return { changes: arrived, entries: [{ supplyId: row.id, kind: input.kind, delta, why: input.why }] };
 	});
 }
+
+/** Booked on the same row, what was bought would bring what hasn't come yet with it. */
+const STILL_ON_ORDER =
+	'What is on this row is still on order. Clear its date once it has come, or add what you bought as a row of its own.';
 
 /** Notes that a tool is out until a date, or back. */
 export async function lendTool(tx: Transaction, actor: Actor, input: LendTool): Promise<void> {

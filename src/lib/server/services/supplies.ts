@@ -114,6 +114,12 @@ export async function createRows(
 	};
 }
 
+/** Whether an amount of the one means the same of the other, so that the row's ledger still adds up. */
+export function isMeasuredAlike(row: { group: string; kind: string }, supply: Supply): boolean {
+	const measure = (kind: string) => SUPPLY_MEASURES[kind as ConsumableKind] ?? null;
+	return row.group === supply.group && measure(row.kind) === measure(supply.kind);
+}
+
 /** The columns that differ, before and after; no change where none do. */
 export function differing(row: { readonly id: string }, wanted: Readonly<Record<string, unknown>>): Change[] {
 	const stored: Readonly<Record<string, unknown>> = { ...row };
@@ -155,8 +161,7 @@ function padRows(pad: AddPad): AddSupply['supply'][] {
 }
 
 function refuseOtherMeasure(row: StoredSupply, supply: Supply): void {
-	const measure = (kind: string) => SUPPLY_MEASURES[kind as ConsumableKind] ?? null;
-	if (row.group !== supply.group || measure(row.kind) !== measure(supply.kind)) {
+	if (!isMeasuredAlike(row, supply)) {
 		throw new Invalid([
 			{
 				path: ['supply', 'kind'],

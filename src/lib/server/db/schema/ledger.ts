@@ -10,23 +10,11 @@ import {
 	text,
 	uniqueIndex
 } from 'drizzle-orm/sqlite-core';
+import { MOVEMENT_KINDS } from '../../../domain/stash';
 import { users } from './people';
 import { projects } from './projects';
 import { rooms } from './rooms';
 import { supplies } from './supplies';
-
-export const MOVEMENT_KINDS = [
-	'bought',
-	'counted',
-	'cut',
-	'used',
-	'spoiled',
-	'offcut-in',
-	'offcut-out',
-	'lent',
-	'returned',
-	'passed-on'
-] as const;
 
 export const ACT_KINDS = [
 	'add',
