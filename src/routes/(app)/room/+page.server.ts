@@ -11,8 +11,8 @@ import { writeExact } from '$lib/domain/length';
 import { page } from '$lib/server/answer';
 import { reader, write } from '$lib/server/db/client';
 import { env } from '$lib/server/env';
-import { Conflict } from '$lib/server/errors';
 import { audit } from '$lib/server/log';
+import { orSay } from '$lib/server/or-say';
 import { getRoom, listInvitations, listPeople, listRooms } from '$lib/server/queries/rooms';
 import {
 	changeRole,
@@ -116,13 +116,3 @@ export const actions: Actions = {
 		redirect(303, '/today');
 	})
 };
-
-/** The last owner's change is refused on the page itself, where she can make somebody else one. */
-async function orSay<T>(work: () => Promise<T>) {
-	try {
-		return await work();
-	} catch (refusal) {
-		if (refusal instanceof Conflict) return fail(refusal.status, { refused: refusal.message });
-		throw refusal;
-	}
-}
