@@ -4,21 +4,29 @@ import { readdirSync } from 'node:fs';
 import { afterAll, beforeAll, describe, expect, it } from 'vitest';
 import type { Database } from '../../src/lib/server/db/client';
 import { openServersDatabase, PASSWORD, signedIn, type Person } from '../factories/people';
+import { project } from '../factories/project';
+import { cardstock, stock } from '../factories/supply';
 import { builtRoutes, pathOf, type BuiltRoute } from '../setup/routes';
 import { Browser, type Answer } from './browser';
 
 let db: Database;
 let owner: Person;
 let routes: BuiltRoute[];
+let supplyId: string;
+let projectId: string;
 beforeAll(async () => {
 	db = await openServersDatabase();
 	owner = await signedIn(db);
 	routes = builtRoutes();
+	const actor = { userId: owner.id, roomId: owner.roomId, role: 'owner', seesPrices: true } as const;
+	supplyId = await stock(db, actor, cardstock());
+	projectId = await project(db, actor);
 });
 afterAll(() => db.close());
 
-const NOBODY = '0190a1b2-0000-7000-8000-000000000000';
-const here = (id: string) => pathOf(id, { room: owner.roomId, id: NOBODY, token: 'x' });
+/** An address of something that is really hers, so that what it might change is there to be changed. */
+const here = (id: string) =>
+	pathOf(id, { room: owner.roomId, id: id.includes('/projects/') ? projectId : supplyId, token: 'x' });
 const assets = () => {
 	const folder = 'build/client/_app/immutable';
 	const some = (kind: string) => readdirSync(`${folder}/${kind}`).slice(0, 3);
@@ -164,7 +172,9 @@ describe('what would change something', () => {
 			db.reader.all(sql`select * from memberships where roomId = ${owner.roomId}`),
 			db.reader.all(sql`select * from invitations where roomId = ${owner.roomId}`),
 			db.reader.all(sql`select * from supplies where roomId = ${owner.roomId}`),
-			db.reader.all(sql`select * from projects where roomId = ${owner.roomId}`)
+			db.reader.all(sql`select * from projects where roomId = ${owner.roomId}`),
+			db.reader.all(sql`select * from acts where roomId = ${owner.roomId}`),
+			db.reader.all(sql`select * from movements where roomId = ${owner.roomId}`)
 		]);
 		return createHash('sha256').update(JSON.stringify(kept)).digest('hex');
 	}
@@ -201,11 +211,11 @@ describe('a flood (ASVS 2.4.1)', () => {
 	it('is held back with a time to wait, and only for whoever floods', async () => {
 		const flooder = await signedIn(db);
 		const make = () => flooder.browser.post('/account?/rename', { name: 'Fern' });
-		const statuses = (await Promise.all(Array.from({ length: 150 }, make))).map((answer) => answer.status);
-		expect(statuses.filter((status) => status === 200).length).toBeGreaterThan(100);
-		expect(statuses).toContain(429);
-		const held = await make();
-		if (held.status === 429) expect(Number(held.headers['retry-after'])).toBeGreaterThan(0);
+		const answers = await Promise.all(Array.from({ length: 150 }, make));
+		expect(answers.filter(({ status }) => status === 200).length).toBeGreaterThan(100);
+		const held = answers.filter(({ status }) => status === 429);
+		expect(held.length).toBeGreaterThan(0);
+		for (const { headers } of held) expect(Number(headers['retry-after'])).toBeGreaterThan(0);
 		const other = await signedIn(db, {}, flooder.browser.from);
 		expect((await other.browser.post('/account?/rename', { name: 'Fern' })).status).toBe(200);
 	});
