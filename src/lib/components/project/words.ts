@@ -29,7 +29,7 @@ export const pieceName = (bill: BillDocument, key: string) =>
 export function edgeWords(bill: BillDocument, result: ProjectResult): string {
 	const named = (lines: readonly { readonly line: string }[]) => {
 		const [first, ...rest] = lines.map(({ line }) => lineName(bill, line));
-		return `${first ?? ''}${rest.length > 0 ? ` and ${count(rest.length, 'more')}`.replace('mores', 'more') : ''}`;
+		return `${first ?? ''}${rest.length > 0 ? ` and ${rest.length} more` : ''}`;
 	};
 	const at = (verdict: LineResult['verdict']) => result.lines.filter((line) => line.verdict === verdict);
 	const copies = result.copies > 1 ? `${result.copies} copies: ` : '';
