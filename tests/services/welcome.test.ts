@@ -7,6 +7,7 @@ import type { Database } from '../../src/lib/server/db/client';
 import { Forbidden } from '../../src/lib/server/errors';
 import { getRoom } from '../../src/lib/server/queries/rooms';
 import { listSupplies } from '../../src/lib/server/queries/supplies';
+import { recount } from '../../src/lib/server/services/stock';
 import { setUpRoom } from '../../src/lib/server/services/welcome';
 import { emptyDatabase, joinRoom, makeRoom } from '../factories/room';
 
@@ -42,6 +43,19 @@ describe('the first hour', () => {
 		const given = answers({ items: ['scissors'], kraft: 5 });
 		for (let time = 0; time < 2; time++) await db.write((tx) => setUpRoom(tx, actor, given));
 		expect(await list(actor)).toHaveLength(2);
+	});
+
+	it('answered once more, leaves what has been counted since as it stands', async () => {
+		const actor = await makeRoom(db);
+		await db.write((tx) => setUpRoom(tx, actor, answers({ kraft: 5 })));
+		const [kraft] = await list(actor);
+		const counts = [{ supply: kraft!.id, left: 2, count: 'counted' as const }];
+		await db.write((tx) => recount(tx, actor, { id: v7(), counts }));
+		await db.write((tx) => setUpRoom(tx, actor, answers({ kraft: 9, items: ['scissors'] })));
+		expect((await list(actor)).map(({ kind, amount, count }) => [kind, amount, count])).toEqual([
+			['kraft-paper', 2, 'counted'],
+			['scissors', 1, 'counted']
+		]);
 	});
 
 	it.each(['in', 'cm', 'mm'] as const)(

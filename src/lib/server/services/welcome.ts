@@ -4,17 +4,23 @@ import type { SheetGoods } from '../../domain/stash';
 import type { BenchItem, Welcome } from '../../schemas/welcome';
 import type { Transaction } from '../db/client';
 import { Forbidden } from '../errors';
+import { stashForMatching } from '../queries/stash';
 import type { Actor } from '../session';
 import { importRoom } from './exchange';
 import { changeRoomSettings } from './rooms';
 
-/** Sets a room up from the first hour's answers: its units, its trimmer's reach, and a row for each thing named. */
+/**
+ * Sets a room up from the first hour's answers: its units, its trimmer's reach, and a row for each thing named. A
+ * row that an earlier answer made stays as it stands: what was counted since is truer than a guess.
+ */
 export async function setUpRoom(tx: Transaction, actor: Actor, answers: Welcome): Promise<void> {
 	if (actor.role !== 'owner') throw new Forbidden();
 	const { name, units } = answers;
 	const reach = answers.reach === '' ? null : parseLength(answers.reach, { unit: units });
 	await changeRoomSettings(tx, actor, { name, units, reach: reach?.ok ? reach.value : null, setUp: true });
-	const supplies = [...answers.items.map((item) => benchRow(item, answers)), ...paperRows(answers)];
+	const there = new Set((await stashForMatching(tx, actor)).map(({ key }) => key));
+	const answered = [...answers.items.map((item) => benchRow(item, answers)), ...paperRows(answers)];
+	const supplies = answered.filter(({ key }) => !there.has(key));
 	if (supplies.length === 0) return;
 	await importRoom(tx, actor, { id: answers.id, document: { format: 'paperlarder', version: 1, supplies } });
 }
