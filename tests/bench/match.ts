@@ -11,7 +11,7 @@ import { billsOf, stashOf } from './match-case';
 
 const supplies = stashOf(5_000, 1);
 const bills = billsOf(500, 2);
-const budget = { work: bills.length * 100_000 };
+const budget = { work: bills.length * 50_000 };
 const matcher = createMatcher();
 
 const cold = run('cold', supplies);

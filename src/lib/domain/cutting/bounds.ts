@@ -19,14 +19,10 @@ const same: Dual = (x) => x;
 
 /** Real areas only: the quickest bound. */
 export function areasOf(model: Model): Inequality[] {
+	const all = model.sheets.map(() => true);
+	const real = turnedBy(model, same);
 	return [
-		inequalityOf(
-			model,
-			model.sheets.map(() => true),
-			same,
-			same,
-			model.sheets.map(({ area }) => area)
-		)
+		{ need: needOf(model, liesWithin(model, all), real, real), give: model.sheets.map(({ area }) => area) }
 	];
 }
 
@@ -34,21 +30,39 @@ export function inequalitiesOf(model: Model, thorough: boolean): Inequality[] {
 	const w = Math.max(0, ...model.sheets.map((sheet) => sheet.w));
 	const h = Math.max(0, ...model.sheets.map((sheet) => sheet.h));
 	const sides = sidesOf(model);
-	const across = dualsOf(w, sides, thorough);
-	const down = dualsOf(h, sides, thorough);
-	const groups = groupsOf(model);
+	const across = dualsOf(w, sides, thorough).map((f) => turnedBy(model, f));
+	const down = dualsOf(h, sides, thorough).map((g) => turnedBy(model, g));
+	const groups = groupsOf(model).map((group) => ({ group, lies: liesWithin(model, group) }));
 	const found = new Map<string, Inequality>();
 	for (const f of across) {
 		for (const g of down) {
-			const give = model.sheets.map((sheet) => f(sheet.w) * g(sheet.h));
-			for (const group of groups) {
-				const inequality = inequalityOf(model, group, f, g, give);
-				const key = inequality.give.join();
-				if (inequality.need > (found.get(key)?.need ?? 0)) found.set(key, inequality);
+			for (const { group, lies } of groups) {
+				const need = needOf(model, lies, f, g);
+				if (need === 0) continue;
+				const give = group.map((open, s) => (open ? (f.sheetW[s] as number) * (g.sheetH[s] as number) : 0));
+				const key = give.join();
+				if (need > (found.get(key)?.need ?? 0)) found.set(key, { need, give });
 			}
 		}
 	}
 	return [...found.values()];
+}
+
+/** Every length of the model as a dual function turns it. */
+interface Turned {
+	readonly w: readonly number[];
+	readonly h: readonly number[];
+	readonly sheetW: readonly number[];
+	readonly sheetH: readonly number[];
+}
+
+function turnedBy({ pieces, sheets }: Model, dual: Dual): Turned {
+	return {
+		w: pieces.map(({ w }) => dual(w)),
+		h: pieces.map(({ h }) => dual(h)),
+		sheetW: sheets.map(({ w }) => dual(w)),
+		sheetH: sheets.map(({ h }) => dual(h))
+	};
 }
 
 function sidesOf(model: Model): number[] {
@@ -66,26 +80,29 @@ function groupsOf(model: Model): boolean[][] {
 	return [...groups.values()];
 }
 
-function inequalityOf(
-	model: Model,
-	group: readonly boolean[],
-	f: Dual,
-	g: Dual,
-	give: readonly number[]
-): Inequality {
-	let need = 0;
-	model.pieces.forEach(({ w, h, qty }, p) => {
+/** By piece, how it may lie on the sheets of a group; -1 where some other sheet takes it too. */
+function liesWithin({ pieces, sheets }: Model, group: readonly boolean[]): number[] {
+	return pieces.map((_, p) => {
 		let lies = 0;
 		for (let s = 0; s < group.length; s++) {
-			const lie = model.sheets[s]?.lies[p] ?? 0;
-			if (lie !== 0 && !group[s]) return;
+			const lie = sheets[s]?.lies[p] ?? 0;
+			if (lie !== 0 && !group[s]) return -1;
 			lies |= lie;
 		}
-		const upright = lies & 1 ? f(w) * g(h) : Infinity;
-		const turned = lies & 2 ? f(h) * g(w) : Infinity;
-		need += qty * Math.min(upright, turned);
+		return lies;
 	});
-	return { need, give: give.map((value, s) => (group[s] ? value : 0)) };
+}
+
+function needOf({ pieces }: Model, lies: readonly number[], f: Turned, g: Turned): number {
+	let need = 0;
+	for (let p = 0; p < pieces.length; p++) {
+		const lie = lies[p] as number;
+		if (lie < 0) continue;
+		const upright = lie & 1 ? (f.w[p] as number) * (g.h[p] as number) : Infinity;
+		const turned = lie & 2 ? (f.h[p] as number) * (g.w[p] as number) : Infinity;
+		need += (pieces[p]?.qty ?? 0) * Math.min(upright, turned);
+	}
+	return need;
 }
 
 function dualsOf(size: number, sides: readonly number[], thorough: boolean): Dual[] {

@@ -35,7 +35,8 @@ export function createMatcher(): Matcher {
 		const known = request.bills.map(holds);
 		const stale = request.bills.filter((_, i) => !known[i]);
 		const shelf = shelve(stale.length > 0 ? request.supplies : [], request.options.kerf);
-		const fresh = matchEach({ ...request, bills: stale }, shelf, budget).map((matched): Kept => {
+		const work = Math.floor((budget.work * stale.length) / Math.max(1, request.bills.length));
+		const fresh = matchEach({ ...request, bills: stale }, shelf, { ...budget, work }).map((matched): Kept => {
 			const tools = request.supplies.flatMap((supply) => (supply.group === 'tool' ? [supply] : []));
 			const result = answerOf(matched, matched.layouts, tools, request.options, false);
 			return { matched, result, text: textOf(matched.bill, matched.copies) };
