@@ -34,6 +34,9 @@ const anyEdit: fc.Arbitrary<Edit> = fc.oneof(
 	}))
 );
 
+/** Enough for most bills, so that edits change what a plan costs and not only whether there is one. */
+const plenty = [aSheet('large', { sheets: 9 }), aSheet('small', { w: inches(6), h: inches(6), sheets: 9 })];
+
 /** Without prices the number of sheets is what a plan keeps down; two plans of one price may differ in it. */
 const unpriced = ({ supplies, ...request }: MatchRequest): MatchRequest => ({
 	...request,
@@ -52,7 +55,7 @@ describe('a matcher that remembers', () => {
 				fc.array(anyEdit, { minLength: 1, maxLength: 5 }),
 				(bills, rows, edits) => {
 					const matcher = createMatcher();
-					let request = unpriced(aRequest({ bills, supplies: rows }));
+					let request = unpriced(aRequest({ bills, supplies: [...rows, ...plenty] }));
 					matcher.match(request, budget);
 					for (const edit of edits) {
 						request = unpriced(edit(request));
