@@ -7,6 +7,7 @@ import {
 	addProject,
 	chooseDesign,
 	editBill,
+	moveProject,
 	renameProject,
 	reorderProjects,
 	restoreProject,
@@ -104,6 +105,20 @@ describe('the queue', () => {
 		await db.write((tx) => reorderProjects(tx, actor, { projects: [b!, c!, a!] }));
 		expect(await names(actor)).toEqual(['B', 'C', 'A']);
 	});
+
+	it('is moved one place at a time, and not past its ends', async () => {
+		const actor = await makeRoom(db);
+		const a = await project(db, actor, cards({ name: 'A' }));
+		await project(db, actor, cards({ name: 'B' }));
+		const move = (by: -1 | 1) => db.write((tx) => moveProject(tx, actor, { project: a, by }));
+		await move(-1);
+		expect(await names(actor)).toEqual(['A', 'B']);
+		await move(1);
+		await move(1);
+		expect(await names(actor)).toEqual(['B', 'A']);
+		await move(-1);
+		expect(await names(actor)).toEqual(['A', 'B']);
+	});
 });
 
 describe('whose it is', () => {
@@ -117,6 +132,7 @@ describe('whose it is', () => {
 			() => db.write((tx) => renameProject(tx, actor, id, { name: 'Taken' })),
 			() => db.write((tx) => setCopies(tx, actor, id, { copies: 3 })),
 			() => db.write((tx) => reorderProjects(tx, actor, { projects: [id] })),
+			() => db.write((tx) => moveProject(tx, actor, { project: id, by: 1 })),
 			() => db.write((tx) => chooseDesign(tx, actor, id, { slot: 'card', design: 'Fern', collection: null })),
 			() => db.write((tx) => trashProject(tx, actor, id)),
 			() => db.write((tx) => restoreProject(tx, actor, id))

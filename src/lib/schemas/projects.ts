@@ -24,6 +24,12 @@ export const reorderProjectsSchema = z.strictObject({
 	projects: z.array(idField).min(1).max(LIMITS.projects)
 });
 
+/** One place up (-1) or down (1) in the queue. */
+export const moveProjectSchema = z.strictObject({
+	project: idField,
+	by: z.coerce.number().pipe(z.literal([-1, 1]))
+});
+
 /** The paper that a slot is to be cut from; null leaves it to the stash. */
 export const chooseDesignSchema = z.strictObject({
 	slot: z.string().max(LIMITS.key),
@@ -36,4 +42,5 @@ export type EditBill = z.output<typeof editBillSchema>;
 export type RenameProject = z.output<typeof renameProjectSchema>;
 export type SetCopies = z.output<typeof setCopiesSchema>;
 export type ReorderProjects = z.output<typeof reorderProjectsSchema>;
+export type MoveProject = z.output<typeof moveProjectSchema>;
 export type ChooseDesign = z.output<typeof chooseDesignSchema>;

@@ -1,4 +1,5 @@
+import { page } from '$lib/server/answer';
 import { startPicture } from '$lib/server/start-picture';
 import type { PageServerLoad } from './$types';
 
-export const load: PageServerLoad = async () => ({ results: await startPicture() });
+export const load: PageServerLoad = page(async () => ({ results: await startPicture() }));

@@ -4,6 +4,7 @@ import type {
 	AddProject,
 	ChooseDesign,
 	EditBill,
+	MoveProject,
 	RenameProject,
 	ReorderProjects,
 	SetCopies
@@ -104,6 +105,16 @@ export async function reorderProjects(tx: Transaction, actor: Actor, input: Reor
 		.set({ position: place })
 		.where(and(eq(projects.roomId, actor.roomId), inArray(projects.id, order)));
 	await touchRoom(tx, actor.roomId);
+}
+
+/** Moves a project one place in the queue as it stands now; at its end it stays where it is. @throws {NotFound} */
+export async function moveProject(tx: Transaction, actor: Actor, input: MoveProject): Promise<void> {
+	const order = (await listProjects(tx, actor)).map(({ id }) => id);
+	const at = order.indexOf(input.project);
+	if (at < 0) throw new NotFound();
+	order.splice(at, 1);
+	order.splice(Math.max(0, at + input.by), 0, input.project);
+	await reorderProjects(tx, actor, { projects: order });
 }
 
 /** Puts a project in the trash, and lets go for good what has lain there long enough. */

@@ -1,15 +1,14 @@
+import { moveProjectSchema } from '$lib/schemas/projects';
 import { page } from '$lib/server/answer';
 import { today as dayNow } from '$lib/server/clock';
 import { reader, write } from '$lib/server/db/client';
 import { namesOfSupplies, papersOfPlan } from '$lib/server/queries/papers';
-import { listProjects } from '$lib/server/queries/projects';
 import { getRoom } from '$lib/server/queries/rooms';
 import { suppliesByKind } from '$lib/server/queries/supplies';
 import { todayFor, unlocksFor } from '$lib/server/queries/today';
-import { reorderProjects } from '$lib/server/services/projects';
+import { moveProject } from '$lib/server/services/projects';
 import { requireActor } from '$lib/server/session';
-import { error, fail, redirect } from '@sveltejs/kit';
-import { z } from 'zod';
+import { fail, redirect } from '@sveltejs/kit';
 import type { Actions, PageServerLoad } from './$types';
 import { flapsOf } from './flaps';
 
@@ -48,22 +47,12 @@ export const load: PageServerLoad = page(async (event) => {
 	} as const;
 });
 
-const moveSchema = z.object({ project: z.uuid(), by: z.coerce.number().pipe(z.literal([-1, 1])) });
-
 export const actions: Actions = {
 	move: page(async (event) => {
 		const actor = await requireActor(event, 'member');
-		const typed = moveSchema.safeParse(Object.fromEntries(await event.request.formData()));
+		const typed = moveProjectSchema.safeParse(Object.fromEntries(await event.request.formData()));
 		if (!typed.success) return fail(400);
-		const { project, by } = typed.data;
-		await write(async (tx) => {
-			const ids = (await listProjects(tx, actor)).map(({ id }) => id);
-			const at = ids.indexOf(project);
-			if (at < 0) error(404, 'That project isn’t in this room any more.');
-			const [moved] = ids.splice(at, 1);
-			ids.splice(Math.max(0, at + by), 0, moved!);
-			await reorderProjects(tx, actor, { projects: ids });
-		});
+		await write((tx) => moveProject(tx, actor, typed.data));
 		redirect(303, '/today?mode=queue');
 	})
 };
