@@ -63,6 +63,18 @@ describe('a room’s export', () => {
 		]);
 	});
 
+	it('leaves out a tool that has gone for good, and its ledger with it', async () => {
+		const { actor } = await furnished();
+		const knife = await stock(db, actor, trimmer({ key: 'knife', kind: 'craft-knife', name: 'Knife' }));
+		await db.write((tx) =>
+			useSupply(tx, actor, { id: v7(), supply: knife, kind: 'spoiled', amount: 1, why: 'It broke' })
+		);
+		const document = documentSchema.parse(await exportRoom(db.reader, actor));
+		expect(document.supplies?.map(({ key }) => key)).not.toContain('knife');
+		expect(document.ledger?.map(({ supply }) => supply)).not.toContain('knife');
+		await take(await makeRoom(db), document);
+	});
+
 	it('says nothing of prices to whom they are not shown', async () => {
 		const { actor } = await furnished();
 		const viewer = await joinRoom(db, actor.roomId, 'viewer');

@@ -53,17 +53,16 @@ async function ledgerOf(
 		.leftJoin(users, eq(users.id, movements.who))
 		.where(and(eq(movements.roomId, actor.roomId), isNull(supplies.deletedAt)))
 		.orderBy(movements.id);
-	return rows.map(({ key, supply, kind, delta, at, act, by, why, undoes }) => ({
-		...{
-			key,
-			supply,
-			kind,
-			change: writeChange(delta, byKey.get(supply)!),
-			at: new Date(at).toISOString(),
-			act
-		},
-		...(by !== null && { by }),
-		...(why !== null && { why }),
-		...(undoes !== null && { undoes })
-	}));
+	return rows.flatMap(({ key, supply, kind, delta, at, by, why, undoes, act }) => {
+		const exported = byKey.get(supply);
+		// A tool that has gone for good is no supply any more, and takes its ledger with it.
+		if (!exported) return [];
+		const change = writeChange(delta, exported);
+		return {
+			...{ key, supply, kind, change, at: new Date(at).toISOString(), act },
+			...(by !== null && { by }),
+			...(why !== null && { why }),
+			...(undoes !== null && { undoes })
+		};
+	});
 }
