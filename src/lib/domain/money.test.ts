@@ -1,6 +1,6 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
-import { formatMoney, isCurrency, minorDigits, parseMoney, totals } from './money';
+import { formatMoney, isCurrency, minorDigits, parseMoney, totals, writeAmount } from './money';
 
 const currencies = fc.constantFrom('USD', 'EUR', 'GBP', 'JPY', 'KWD', 'CLF', 'ISK', 'HUF');
 const amounts = fc.integer({ min: 0, max: 99_999_999 });
@@ -24,6 +24,15 @@ describe('laws', () => {
 			fc.property(amounts, (amount) => {
 				const money = { amount, currency: 'USD' };
 				expect(parseMoney(formatMoney(money), 'USD')).toEqual({ ok: true, value: money });
+			})
+		);
+	});
+
+	it('reads back what it writes to be typed, in any currency', () => {
+		fc.assert(
+			fc.property(amounts, fc.constantFrom('USD', 'CAD', 'MXN', 'JPY', 'KWD', 'CLF'), (amount, currency) => {
+				const money = { amount, currency };
+				expect(parseMoney(writeAmount(money), currency)).toEqual({ ok: true, value: money });
 			})
 		);
 	});

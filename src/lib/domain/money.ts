@@ -40,6 +40,13 @@ export function formatMoney({ amount, currency }: Money, locale = 'en-US'): stri
 	}).format(amount / 10 ** places);
 }
 
+/** Typeable, in any currency: `12.50`, `1250`, `12.500`. */
+export function writeAmount({ amount, currency }: Money): string {
+	const places = minorDigits(currency);
+	const digits = String(amount).padStart(places + 1, '0');
+	return places === 0 ? digits : `${digits.slice(0, -places)}.${digits.slice(-places)}`;
+}
+
 /** One total for each currency, in the order they first come; amounts of two currencies are never added. */
 export function totals(prices: readonly Money[]): Money[] {
 	const sums = new Map<string, number>();

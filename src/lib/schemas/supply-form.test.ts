@@ -24,8 +24,18 @@ describe('the supply form', () => {
 			brandingStrip: { edge: 'bottom', depth: '1/4 in' }
 		},
 		{ key: 'tape', kind: 'tape', name: 'Tape', width: '1/4 in', left: '98 in', full: '27 yd', bin: 'Tray 3' },
-		{ key: 'glue', kind: 'glue', name: 'Glue', left: '40 ml', full: '4 fl oz' },
-		{ key: 'brads', kind: 'brads', name: 'Brads', left: 0, full: 100 },
+		{
+			key: 'glue',
+			kind: 'glue',
+			name: 'Glue',
+			left: '40 ml',
+			full: '4 fl oz',
+			price: { amount: 650, currency: 'CAD' }
+		},
+		{
+			...{ key: 'brads', kind: 'brads', name: 'Brads', left: 0, full: 100 },
+			price: { amount: 12_345, currency: 'JPY' }
+		},
 		{
 			key: 'punch',
 			kind: 'corner-punch',

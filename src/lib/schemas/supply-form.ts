@@ -1,6 +1,6 @@
 import { z } from 'zod';
 import { readSupply, Unreadable, writeSupply, type Issue, type SupplyDocument } from '../domain/exchange';
-import { formatMoney, parseMoney } from '../domain/money';
+import { parseMoney, writeAmount } from '../domain/money';
 import { SHEET_KINDS, SUPPLY_MEASURES, TOOL_KINDS, type ConsumableKind, type Supply } from '../domain/stash';
 import { keyFrom } from './key';
 import type { RoomUnits } from './rooms';
@@ -82,7 +82,7 @@ export function filledForm(id: string, version: number, supply: Supply, currency
 	return fields.parse({
 		...{ id, version, kind: supply.kind, name: supply.name },
 		...Object.fromEntries(PLAIN.map((name) => [name, typed(name)])),
-		price: supply.price ? formatMoney(supply.price) : '',
+		price: supply.price ? writeAmount(supply.price) : '',
 		currency: supply.price?.currency ?? currency,
 		unsure: supply.group !== 'tool' && supply.count === 'unsure',
 		...(supply.group === 'tool' ? { toolSize: typed('size') } : { size: typed('size') }),
