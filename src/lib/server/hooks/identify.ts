@@ -2,6 +2,7 @@ import type { Handle } from '@sveltejs/kit';
 import { sessionSecret } from '../../../auth';
 import { reader, write } from '../db/client';
 import { env } from '../env';
+import { describeError, log } from '../log';
 import { findSession } from '../queries/people';
 import { isSeenStale, noteSeen } from '../services/sessions';
 
@@ -13,7 +14,16 @@ export const identify: Handle = async ({ event, resolve }) => {
 		const { user, session, seenAt } = signedIn;
 		event.locals.user = user.email === env.ADMIN_EMAIL ? { ...user, siteRole: 'admin' } : user;
 		event.locals.session = session;
-		if (isSeenStale(seenAt)) await write((tx) => noteSeen(tx, session.id));
+		if (isSeenStale(seenAt)) await note(session.id);
 	}
 	return resolve(event);
 };
+
+/** What can be read is read even where nothing can be written. */
+async function note(sessionId: string): Promise<void> {
+	try {
+		await write((tx) => noteSeen(tx, sessionId));
+	} catch (error) {
+		log.warn(describeError(error), 'session.not-noted');
+	}
+}
