@@ -2,7 +2,7 @@ import { beforeEach, describe, expect, it, vi } from 'vitest';
 import { v7 } from 'uuid';
 import { readRoomSettings, roomSettingsSchema } from '../../src/lib/schemas/rooms';
 import type { Database } from '../../src/lib/server/db/client';
-import { Conflict, NotFound } from '../../src/lib/server/errors';
+import { Conflict, Forbidden, NotFound } from '../../src/lib/server/errors';
 import {
 	findInvitation,
 	findMembership,
@@ -29,6 +29,22 @@ beforeEach(async () => {
 
 const roleOf = async (userId: string, roomId: string) =>
 	(await findMembership(db.reader, userId, roomId))?.role;
+
+describe('what only an owner may do', () => {
+	it('is refused to a member by the service itself; leaving is hers', async () => {
+		const owner = await makeRoom(db);
+		const member = await joinRoom(db, owner, 'member');
+		for (const verb of [
+			() => db.write((tx) => invite(tx, member, 'owner')),
+			() => db.write((tx) => changeRole(tx, member, member.userId, 'owner')),
+			() => db.write((tx) => removePerson(tx, member, owner.userId)),
+			() => db.write((tx) => changeRoomSettings(tx, member, { pricesShown: true }))
+		])
+			await expect(verb()).rejects.toThrow(Forbidden);
+		await db.write((tx) => removePerson(tx, member, member.userId));
+		expect(await roleOf(member.userId, owner.roomId)).toBeUndefined();
+	});
+});
 
 describe('an invitation', () => {
 	it('lets one person in, with its role', async () => {

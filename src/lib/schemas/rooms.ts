@@ -1,5 +1,6 @@
 import { z } from 'zod';
 import { parseLength } from '../domain/length';
+import { isCurrency } from '../domain/money';
 
 /** What somebody may do in a room: owners run it, members add, cut and plan, viewers see. */
 export const ROOM_ROLES = ['owner', 'member', 'viewer'] as const;
@@ -35,7 +36,7 @@ export const roomSettingsSchema = z
 			.string()
 			.trim()
 			.toUpperCase()
-			.regex(/^[A-Z]{3}$/, 'Three letters, as on a bank’s list: USD, EUR, GBP.'),
+			.refine(isCurrency, 'Three letters, as on a bank’s list: USD, EUR, GBP.'),
 		pricesShown: z.boolean().default(false)
 	})
 	.superRefine((typed, check) => {

@@ -14,8 +14,10 @@ export function verdictWords(verdict: Verdict, on: string | null = null): string
 	return `After ${dayOf(on)}`;
 }
 
-/** A date as it is said: `12 March`. */
-export const dayOf = (on: string) =>
-	new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', timeZone: 'UTC' }).format(
+/** A date as it is said: `12 March`, and with its year where that isn't this one. */
+export function dayOf(on: string): string {
+	const year = on.startsWith(String(new Date().getUTCFullYear())) ? undefined : 'numeric';
+	return new Intl.DateTimeFormat('en-GB', { day: 'numeric', month: 'long', year, timeZone: 'UTC' }).format(
 		new Date(`${on}T00:00:00Z`)
 	);
+}

@@ -37,8 +37,8 @@ function matchInTurn(
 		return turn;
 	});
 	const tools = supplies.flatMap((supply) => (supply.group === 'tool' ? [supply] : []));
-	return turns.map(({ matched, nowIfFirst }) => {
-		const layouts = matched.verdict === 'short' ? matched.layouts : queue.layouts;
+	return turns.map(({ matched, nowIfFirst, queue: atItsTurn }) => {
+		const layouts = matched.verdict === 'short' ? [...atItsTurn.layouts, ...matched.layouts] : queue.layouts;
 		return answerOf(matched, layouts, tools, options, nowIfFirst);
 	});
 }

@@ -29,6 +29,14 @@ describe('a queue', () => {
 		expect(results[0]?.plan?.sheets[0]?.placements).toHaveLength(4);
 	});
 
+	it('draws what a short one can cut on whole sheets, with the cuts that free it', () => {
+		const results = queued({ bills: [piece('a', 12, 5), piece('b', 12, 4, 2)], supplies: [aSheet('fern')] });
+		expect(results.map(({ verdict }) => verdict)).toEqual(['now', 'short']);
+		const [sheet] = results[1]?.plan?.sheets ?? [];
+		expect(sheet?.cuts[0]?.of).toEqual({ x: 0, y: 0, w: inches(12), h: inches(12) });
+		expect(sheet?.placements.map(({ project }) => project).sort()).toEqual(['a', 'b']);
+	});
+
 	it('reserves adhesive, and nothing for a project that is short', () => {
 		const taped = (key: string, need: number) =>
 			aBill(key, {

@@ -12,12 +12,14 @@ interface Allowance {
 const READS: Allowance = { most: 600, perSecond: 20 };
 const WRITES: Allowance = { most: 120, perSecond: 2 };
 const SWEEP_AT = 10_000;
+const SWEEP_EVERY_S = 10;
 
 interface Bucket {
 	left: number;
 	at: number;
 }
 const buckets = new Map<string, Bucket>();
+let swept = 0;
 
 /** Holds back whoever asks for far too much, by person where signed in, else by network. In memory, per process. */
 export const floods: Handle = ({ event, resolve }) => {
@@ -35,7 +37,7 @@ function take(key: string, { most, perSecond }: Allowance): number {
 	const bucket = buckets.get(key) ?? { left: most, at: now };
 	bucket.left = Math.min(most, bucket.left + (now - bucket.at) * perSecond);
 	bucket.at = now;
-	if (buckets.size >= SWEEP_AT) sweep(now);
+	if (buckets.size >= SWEEP_AT && now - swept > SWEEP_EVERY_S) sweep(now);
 	buckets.set(key, bucket);
 	if (bucket.left < 1) return Math.ceil((1 - bucket.left) / perSecond);
 	bucket.left -= 1;
@@ -44,6 +46,7 @@ function take(key: string, { most, perSecond }: Allowance): number {
 
 /** A bucket untouched this long is full again, and so is a new one. */
 function sweep(now: number): void {
+	swept = now;
 	for (const [key, { at }] of buckets) {
 		if (now - at > 60) buckets.delete(key);
 	}

@@ -63,6 +63,7 @@ export async function supplyById(db: Reader | Transaction, actor: Actor, id: str
 		.select({
 			id: movements.id,
 			act: movements.act,
+			deed: acts.kind,
 			kind: movements.kind,
 			delta: movements.delta,
 			/** What was left after it. */
@@ -79,6 +80,7 @@ export async function supplyById(db: Reader | Transaction, actor: Actor, id: str
 		})
 		.from(movements)
 		.leftJoin(users, eq(users.id, movements.who))
+		.leftJoin(acts, and(eq(acts.roomId, movements.roomId), eq(acts.id, movements.act)))
 		.where(and(eq(movements.roomId, actor.roomId), eq(movements.supplyId, id)))
 		.orderBy(desc(movements.id))
 		.limit(500);

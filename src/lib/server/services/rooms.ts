@@ -3,7 +3,7 @@ import { v7 } from 'uuid';
 import type { RoomRole, RoomSettings } from '../../schemas/rooms';
 import type { Transaction } from '../db/client';
 import { invitations, memberships, rooms } from '../db/schema/rooms';
-import { Conflict, NotFound } from '../errors';
+import { Conflict, Forbidden, NotFound } from '../errors';
 import { LIFETIME_MS } from '../lifetimes';
 import { INVITATION_OVER, stillOpen } from '../queries/rooms';
 import { hashSecret, newSecret } from '../secrets';
@@ -31,12 +31,14 @@ export async function changeRoomSettings(
 	actor: Actor,
 	settings: Partial<RoomSettings & { setUp: boolean }>
 ): Promise<void> {
+	requireOwner(actor);
 	await tx.update(rooms).set(settings).where(eq(rooms.id, actor.roomId));
 	await touchRoom(tx, actor.roomId);
 }
 
 /** @returns the secret of the invitation's link, which is shown once and not kept */
 export async function invite(tx: Transaction, actor: Actor, role: RoomRole): Promise<string> {
+	requireOwner(actor);
 	const secret = newSecret();
 	const now = Date.now();
 	await tx.insert(invitations).values({
@@ -53,6 +55,7 @@ export async function invite(tx: Transaction, actor: Actor, role: RoomRole): Pro
 
 /** @throws {NotFound} */
 export async function withdrawInvitation(tx: Transaction, actor: Actor, id: string): Promise<void> {
+	requireOwner(actor);
 	const withdrawn = await tx
 		.update(invitations)
 		.set({ revokedAt: Date.now() })
@@ -83,6 +86,7 @@ export async function changeRole(
 	userId: string,
 	role: RoomRole
 ): Promise<void> {
+	requireOwner(actor);
 	const changed = await tx
 		.update(memberships)
 		.set({ role })
@@ -94,6 +98,7 @@ export async function changeRole(
 
 /** Takes somebody out of the room; one's own id leaves it. @throws {NotFound | Conflict} */
 export async function removePerson(tx: Transaction, actor: Actor, userId: string): Promise<void> {
+	if (userId !== actor.userId) requireOwner(actor);
 	const removed = await tx
 		.delete(memberships)
 		.where(and(eq(memberships.roomId, actor.roomId), eq(memberships.userId, userId)))
@@ -108,4 +113,8 @@ async function assertOwned(tx: Transaction, roomId: string): Promise<void> {
 		.from(memberships)
 		.where(and(eq(memberships.roomId, roomId), eq(memberships.role, 'owner')));
 	if (!row?.owners) throw new Conflict('A room needs an owner: make somebody else one first.');
+}
+
+function requireOwner(actor: Actor): void {
+	if (actor.role !== 'owner') throw new Forbidden();
 }

@@ -5,6 +5,7 @@ import { returnPath } from '$lib/return-path';
 import { readSupplyFilter } from '$lib/schemas/supply-filter';
 import { moveSchema, trashSchema, undoSchema } from '$lib/schemas/supplies';
 import { page } from '$lib/server/answer';
+import { today } from '$lib/server/clock';
 import { reader, write } from '$lib/server/db/client';
 import { orSay } from '$lib/server/or-say';
 import { doneAct } from '$lib/server/queries/acts';
@@ -33,9 +34,8 @@ export const load: PageServerLoad = page(async (event) => {
 	if (found.page > found.pages) {
 		redirect(303, addressWith(event.url, { page: String(found.pages) }));
 	}
-	const today = new Date().toISOString().slice(0, 10);
 	return {
-		found: { ...found, rows: found.rows.map((row) => listed(row, today)) },
+		found: { ...found, rows: found.rows.map((row) => listed(row, today())) },
 		filter,
 		typed: { q: params.get('q') ?? '', size: params.get('size') ?? '' },
 		view: params.get('view') === 'pictures' ? ('pictures' as const) : ('table' as const),

@@ -10,6 +10,7 @@ import {
 	useSchema
 } from '$lib/schemas/supplies';
 import { page } from '$lib/server/answer';
+import { today } from '$lib/server/clock';
 import { reader, write } from '$lib/server/db/client';
 import { Conflict, Invalid } from '$lib/server/errors';
 import { doneAct } from '$lib/server/queries/acts';
@@ -40,7 +41,7 @@ export const load: PageServerLoad = page(async (event) => {
 	]);
 	return {
 		supply: { ...supply, picture: supply.picture !== null },
-		due: listed(supply, new Date().toISOString().slice(0, 10)).arrives,
+		due: listed(supply, today()).arrives,
 		ledger,
 		bins: bins.map(({ name }) => name),
 		writes: actor.role !== 'viewer',
