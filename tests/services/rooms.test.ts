@@ -33,7 +33,7 @@ const roleOf = async (userId: string, roomId: string) =>
 describe('what only an owner may do', () => {
 	it('is refused to a member by the service itself; leaving is hers', async () => {
 		const owner = await makeRoom(db);
-		const member = await joinRoom(db, owner, 'member');
+		const member = await joinRoom(db, owner.roomId, 'member');
 		for (const verb of [
 			() => db.write((tx) => invite(tx, member, 'owner')),
 			() => db.write((tx) => changeRole(tx, member, member.userId, 'owner')),
