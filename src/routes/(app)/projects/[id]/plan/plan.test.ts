@@ -1,8 +1,9 @@
 import fc from 'fast-check';
 import { describe, expect, it } from 'vitest';
+import { layoutsOf } from '$lib/components/sheet/layouts';
 import type { PlannedCut, PlannedSheet } from '$lib/domain/matching/verdict';
 import { cutWords, fenceRuns } from './fence';
-import { layoutsOf, leftoversOf } from './layouts';
+import { leftoversOf } from './leftovers';
 
 const whole = { x: 0, y: 0, w: 100, h: 100 };
 const cutAt = (at: number): PlannedCut => ({ axis: 'across', at, of: whole });
