@@ -22,7 +22,6 @@ await build();
 
 mkdirSync(data, { recursive: true });
 const port = await freePort(Number(process.env.PORT || 3000));
-const mailPort = await freePort(2525);
 const origin = `http://localhost:${port}`;
 const env = {
 	...process.env,
@@ -33,7 +32,7 @@ const env = {
 	DATA_DIR: data,
 	DATABASE_URL: `file:${join(data, 'paperlarder.db')}`,
 	AUTH_SECRET: secret(),
-	SMTP_URL: `smtp://127.0.0.1:${mailPort}`,
+	SMTP_URL: 'smtp://127.0.0.1:2525',
 	LOG_LEVEL: process.env.LOG_LEVEL || 'warn',
 	SHUTDOWN_TIMEOUT: '2',
 	DEMO: '1'
@@ -42,6 +41,9 @@ const env = {
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => end(0));
 process.on('exit', () => rmSync(running, { force: true }));
 await seed();
+// Looked for only now: filling the room takes long enough for another program to take the port.
+const mailPort = await freePort(2525);
+env.SMTP_URL = `smtp://127.0.0.1:${mailPort}`;
 start([...bin('tsx/dist/cli.mjs'), 'tests/fakes/smtp.ts'], { SMTP_PORT: String(mailPort) });
 start([process.execPath, 'build']);
 await ready();
