@@ -202,14 +202,19 @@ describe('sizes', () => {
 		['16,2 x 11,4 cm', 51_840, 36_480, 'cm'],
 		['210x297mm', 67_200, 95_040, 'mm'],
 		['12 in x 30 cm', 97_536, 96_000, 'in'],
-		['12 in x 12', 97_536, 97_536, 'in']
+		['12 in x 12', 97_536, 97_536, 'in'],
+		['A4', 67_200, 95_040, 'mm'],
+		['us letter', 69_088, 89_408, 'in']
 	])('%s', (text, w, h, unit) => {
 		expect(parseSize(text, inches)).toEqual({ ok: true, w, h, unit });
 	});
 
-	it.each(['12', '12 x', 'x 12', '1 x 2 x 3', '0 x 4', "5' x 3'", '5 x 7..3', ''])('refuses “%s”', (text) => {
-		expect(parseSize(text, inches).ok).toBe(false);
-	});
+	it.each(['12', 'A44', '12 x', 'x 12', '1 x 2 x 3', '0 x 4', "5' x 3'", '5 x 7..3', ''])(
+		'refuses “%s”',
+		(text) => {
+			expect(parseSize(text, inches).ok).toBe(false);
+		}
+	);
 
 	it('is shown with one unit and one ≈', () => {
 		expect(formatSize(42_672, 62_992, 'in')).toBe('5 1⁄4 × 7 3⁄4 in');

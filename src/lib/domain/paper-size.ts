@@ -1,5 +1,5 @@
-import { CENTIMETRE, INCH, MILLIMETRE, type Length } from './length';
 import { plainTyping } from './length/typed';
+import { CENTIMETRE, INCH, MILLIMETRE, type Length } from './length/units';
 
 /** A size with a name, upright: `w` is never more than `h`. */
 export interface PaperSize {

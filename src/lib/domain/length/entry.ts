@@ -1,3 +1,4 @@
+import { paperSize } from '../paper-size';
 import { writeExact, writeMark } from './display';
 import { readRational, type Rational } from './rational';
 import { plainTyping } from './typed';
@@ -6,6 +7,7 @@ import {
 	LONGEST_ROLL,
 	LONGEST_SHEET,
 	METRE,
+	MILLIMETRE,
 	UNIT_LENGTH,
 	type Length,
 	type LengthUnit
@@ -35,21 +37,28 @@ export function parseLength(text: string, entry: LengthEntry): LengthRead {
 }
 
 /**
- * Reads width and height, `5 1/4 x 7 3/4 in`. A unit at the end serves both, and so does one on the first side
- * alone; the unit that comes back is the first side's.
+ * Reads width and height, `5 1/4 x 7 3/4 in`, or the name of a size, `A4`. A unit at the end serves both, and so
+ * does one on the first side alone; the unit that comes back is the first side's. A named size comes back upright.
  */
 export function parseSize(text: string, entry: LengthEntry): SizeRead {
 	if (text.length > 2 * LONGEST_TYPING)
 		return refuse('That is too much for one size. Type it like 5 1/4 x 7 3/4 in.');
 	const sides = plainTyping(text).split(/ ?(?:x|\bby\b) ?/);
 	const [first, second] = sides;
-	if (sides.length !== 2 || !first || !second) return refuse('Type both sides, like 5 1/4 x 7 3/4 in.');
+	const named = sides.length === 1 ? paperSize(text) : null;
+	if (named) return { ok: true, w: named.w, h: named.h, unit: unitNamed(named) };
+	if (sides.length !== 2 || !first || !second)
+		return refuse('Type both sides, like 5 1/4 x 7 3/4 in, or a name, like A4 or Letter.');
 	const [firstUnit, secondUnit] = [unitOf(first), unitOf(second)];
 	const w = readOne(first, firstUnit ?? secondUnit ?? entry.unit, entry);
 	if (!w.ok) return w;
 	const h = readOne(second, secondUnit ?? firstUnit ?? entry.unit, entry);
 	if (!h.ok) return h;
 	return { ok: true, w: w.value, h: h.value, unit: w.unit };
+}
+
+function unitNamed({ w, h }: { w: Length; h: Length }): LengthUnit {
+	return w % MILLIMETRE === 0 && h % MILLIMETRE === 0 ? 'mm' : 'in';
 }
 
 function readOne(typed: string, bare: LengthUnit, entry: LengthEntry): LengthRead {
