@@ -58,11 +58,14 @@ export async function unlocksFor(
 	by: Matcher = matcher
 ): Promise<readonly Unlock[]> {
 	const room = await roomOf(db, actor);
-	return purchases.of(`${room.id} ${on}`, room.revision, async () => {
+	const found = await purchases.of(`${room.id} ${on}`, room.revision, async () => {
 		const projects = await listProjects(db, actor);
 		const { unlocks = [] } = await asked(db, actor, room, projects, { mode: 'each', on }, by, true);
 		return unlocks;
 	});
+	// What is kept serves everybody in the room; what a thing costs isn't everybody's to know.
+	if (actor.seesPrices) return found;
+	return found.map(({ buy, ...unlock }) => ({ ...unlock, buy: { ...buy, price: null } }));
 }
 
 type Room = typeof rooms.$inferSelect;
