@@ -35,11 +35,21 @@ describe('markup in any text (ASVS 1.2.1)', () => {
 		const supplyDocument = cardstock({
 			name: HOSTILE,
 			collection: HOSTILE,
-			bin: HOSTILE.slice(0, 60)
-		} as never);
+			bin: HOSTILE.slice(0, 60),
+			faces: [{ design: HOSTILE, direction: 'none' }]
+		});
 		const added = await browser.send('POST', `${own}/supplies`, { id: supply, supply: supplyDocument });
 		expect(added.status, added.text).toBe(201);
-		const billDocument = cards({ name: HOSTILE } as never);
+		const why = { id: v7(), kind: 'used', amount: 1, why: HOSTILE };
+		const booked = await browser.send('POST', `${own}/supplies/${supply}/movements`, why);
+		expect(booked.status, booked.text).toBe(201);
+		const billDocument = cards({
+			name: HOSTILE,
+			slots: [{ key: 'card', name: HOSTILE, material: { kind: 'cardstock' } }],
+			pieces: [{ key: 'front', name: HOSTILE, slot: 'card', w: '5 in', h: '4 in', qty: 2 }],
+			tools: [{ key: 'trim', name: HOSTILE, kind: 'trimmer', reach: '99 in' }],
+			steps: [{ text: HOSTILE, tools: ['trim'], pieces: ['front'] }]
+		});
 		const planned = await browser.send('POST', `${own}/projects`, { id: bill, bill: billDocument });
 		expect(planned.status, planned.text).toBe(201);
 		await browser.post('/account?/rename', { name: HOSTILE.slice(0, 80) });
