@@ -1,8 +1,12 @@
-import { describe, expect, test } from 'vitest';
+import { afterAll, beforeAll, describe, expect, test, vi } from 'vitest';
 import type { BillDocument } from '$lib/domain/exchange';
 import { INCH } from '$lib/domain/length';
 import type { ProjectResult } from '$lib/domain/matching/verdict';
-import { edgeWords, lineName, lineNotes, missingPieces, nearWords, wantedWords } from './words';
+import { edgeWords, kindWanted, lineName, lineNotes, missingPieces, nearWords, wantedWords } from './words';
+
+/** A date says its year only where that isn’t this one. */
+beforeAll(() => void vi.setSystemTime('2027-05-01'));
+afterAll(() => void vi.useRealTimers());
 
 const bill: BillDocument = {
 	key: 'tag-book',
@@ -40,6 +44,15 @@ describe('a line is called', () => {
 		['tools/punch', 'Corner punch'],
 		['tools/board-cut', 'A tool that cuts board']
 	])('%s: %s', (line, name) => expect(lineName(bill, line)).toBe(name));
+});
+
+describe('what would serve a line is of the kind', () => {
+	test.each([
+		['slots/board', 'chipboard'],
+		['adhesives/rim', 'tape'],
+		['tools/punch', 'corner-punch'],
+		['tools/board-cut', undefined]
+	])('%s: %s', (line, kind) => expect(kindWanted(bill, line)).toBe(kind));
 });
 
 describe('the edge of a flap says', () => {

@@ -22,6 +22,14 @@ export function lineName(bill: BillDocument, line: string): string {
 	return need?.name ?? kindWords(need?.kind ?? '');
 }
 
+/** The kind of supply that would serve a line; undefined where several kinds would. */
+export function kindWanted(bill: BillDocument, line: string): string | undefined {
+	const [list, key] = line.split('/');
+	if (list === 'slots') return bill.slots.find((slot) => slot.key === key)?.material.kind;
+	if (list === 'tools') return bill.tools?.find((tool) => tool.key === key)?.kind;
+	return consumable(bill, line)?.kind;
+}
+
 export const pieceName = (bill: BillDocument, key: string) =>
 	bill.pieces.find((piece) => piece.key === key)?.name ?? kindWords(key ?? '');
 
