@@ -24,7 +24,7 @@ test('a pad, an offcut and a tape go into the stash, are found again, moved, thr
 		await page.waitForURL(/\/supplies\?collection=/);
 		await expect(page.getByText('12 rows are in the stash.')).toBeVisible();
 		await expect(page.getByRole('row', { name: /Acorn Spot/ })).toContainText('2 sheets');
-		await expect(page.getByRole('row', { name: /Design 2\b/ })).toBeVisible();
+		await expect(page.getByRole('row', { name: /Design 02\b/ })).toBeVisible();
 	});
 	await test.step('a refused size is said beside its field, and what was typed stays', async () => {
 		await page.goto('/supplies/new', SETTLED);

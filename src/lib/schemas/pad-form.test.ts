@@ -57,6 +57,7 @@ describe('names of a pad’s designs', () => {
 			'Bramble Rows',
 			'Design 4'
 		]);
+		expect(designNames('', 12)[1]).toBe('Design 02');
 	});
 
 	it('gives each design a name, whatever was pasted', () => {

@@ -2,6 +2,7 @@ import { v7 } from 'uuid';
 import { readSupply } from '../../domain/exchange';
 import { SUPPLY_MEASURES, type ConsumableKind, type Face, type Supply } from '../../domain/stash';
 import { keyFrom } from '../../schemas/key';
+import { designNumbered } from '../../schemas/pad-names';
 import type { AddPad, AddSupply, EditSupply } from '../../schemas/supplies';
 import type { Transaction } from '../db/client';
 import type { Change } from '../db/schema/ledger';
@@ -141,7 +142,7 @@ function padRows(pad: AddPad): AddSupply['supply'][] {
 	const { kind, name, size, weight, barcode, bin, designs, sheets, price } = pad;
 	return Array.from({ length: designs }, (_, nth) => {
 		const { front, frontDirection, back, backDirection } = pad.described[nth] ?? {};
-		const design = front ?? `Design ${nth + 1}`;
+		const design = front ?? designNumbered(nth, designs);
 		const faces: Face[] = [{ design, direction: frontDirection ?? 'none' }];
 		if (pad.doubleSided && back) faces.push({ design: back, direction: backDirection ?? 'none' });
 		return {
